@@ -1,0 +1,37 @@
+/** The 31 house systems, in the order of a walk from roof to paperwork. */
+export const HOUSE_SYSTEMS = [
+  { key: 'roof', title: 'Roof covering, flashing, gutters' },
+  { key: 'roof-ventilation', title: 'Roof and attic ventilation' },
+  { key: 'siding', title: 'Siding and outside paint' },
+  { key: 'windows', title: 'Windows' },
+  { key: 'egress', title: 'Egress in sleeping rooms' },
+  { key: 'outside-doors', title: 'Outside doors' },
+  { key: 'foundation', title: 'Foundation' },
+  { key: 'crawl-space', title: 'Crawl space, cellar, basement' },
+  { key: 'pests', title: 'Pests' },
+  { key: 'floor-structure', title: 'Floor structure and subfloor' },
+  { key: 'insulation', title: 'Insulation' },
+  { key: 'supply-piping', title: 'Supply piping' },
+  { key: 'drain-piping', title: 'Drain, waste and vent piping' },
+  { key: 'sewer', title: 'Sewer lateral' },
+  { key: 'water-heater', title: 'Water heater' },
+  { key: 'electrical', title: 'Electrical service and wiring' },
+  { key: 'lighting', title: 'Lighting, devices, alarms' },
+  { key: 'heating-cooling', title: 'Heating and cooling' },
+  { key: 'floors', title: 'Floors' },
+  { key: 'walls', title: 'Walls and paint' },
+  { key: 'ceilings', title: 'Ceilings' },
+  { key: 'inside-walls', title: 'Inside walls and openings' },
+  { key: 'inside-doors', title: 'Inside doors and trim' },
+  { key: 'kitchen', title: 'Kitchen' },
+  { key: 'bathroom', title: 'Bathroom' },
+  { key: 'laundry', title: 'Laundry' },
+  { key: 'smells', title: 'Smells and stains' },
+  { key: 'site', title: 'Site: grading, drainage, walks, decks, garage, fences' },
+  { key: 'hazards', title: 'Hazards' },
+  { key: 'permits', title: 'Permits, design, disposal, protection' },
+  { key: 'inspections', title: 'Inspections and tests' },
+] as const
+
+export type SystemKey = (typeof HOUSE_SYSTEMS)[number]['key']
+export const SYSTEM_KEYS = HOUSE_SYSTEMS.map((system) => system.key) as [SystemKey, ...SystemKey[]]
