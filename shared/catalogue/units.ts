@@ -35,7 +35,9 @@ export const UNITS = [
 export type UnitKey = (typeof UNITS)[number]['key']
 export const UNIT_KEYS = UNITS.map((unit) => unit.key) as [UnitKey, ...UnitKey[]]
 
-const unitBySpelling = new Map<string, Unit>(UNITS.flatMap((unit) => [unit.key, ...unit.aliases].map((spelling) => [spelling, unit] as const)))
+const unitBySpelling = new Map<string, Unit>(
+  UNITS.flatMap((unit) => [unit.key, ...unit.aliases].map((spelling) => [spelling, unit] as const)),
+)
 
 /** The unit that a spelling names (`SF`, `sq ft`, `sf` are one), or `null`. */
 export function findUnit(spelling: string): Unit | null {

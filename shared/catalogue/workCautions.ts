@@ -1,0 +1,91 @@
+import type { Caution } from './cautions.ts'
+
+/** What the work itself can do to whoever carries it out, and to the house around it. */
+export const WORK_CAUTIONS: readonly Caution[] = [
+  {
+    key: 'electrical',
+    title: 'Electrical work',
+    text: 'Services, panels and wiring are for a licensed electrician under permit. Treat every wire as live: a switched-off breaker in an old house may feed less, or more, than its label says. Water and old wiring together wait for the electrician.',
+    systems: ['electrical', 'lighting', 'heating-cooling', 'water-heater', 'kitchen', 'laundry', 'inside-walls', 'crawl-space'],
+    source: 'NFPA 70 (National Electrical Code); 29 CFR 1926 subpart K',
+  },
+  {
+    key: 'knob-and-tube',
+    title: 'Knob-and-tube wiring',
+    text: 'Houses of this age may still run on open wiring on porcelain, which has no ground and must not be buried in insulation. Insurers may refuse it. A licensed electrician decides what stays, before any insulation is added or any wall is closed.',
+    systems: ['electrical', 'lighting', 'insulation', 'inside-walls', 'kitchen'],
+    appliesBeforeYear: 1950,
+    source: 'NFPA 70 article 394',
+  },
+  {
+    key: 'aluminum-wiring',
+    title: 'Aluminum branch wiring',
+    text: 'Wiring added from about 1965 to 1973 may be aluminum, whose connections overheat. Changing a device is not a cure: a licensed electrician looks at every connection and chooses the repair.',
+    systems: ['electrical', 'lighting', 'kitchen', 'laundry'],
+    appliesBeforeYear: 1974,
+    source: 'CPSC publication 516; NFPA 70 article 110.14',
+  },
+  {
+    key: 'gas',
+    title: 'Gas and fuel-burning appliances',
+    text: 'Gas piping, venting and burners are for a licensed trade. At a smell of gas leave, touch no switch, and call from outside. Closing up a house, moving a wall or adding a fan can make a vent draw backward: have combustion and draft tested after the work.',
+    systems: ['heating-cooling', 'water-heater', 'kitchen', 'laundry'],
+    source: 'NFPA 54 (National Fuel Gas Code); IRC chapter 24',
+  },
+  {
+    key: 'alarms',
+    title: 'Smoke and carbon monoxide alarms',
+    text: 'The model code asks for smoke alarms in each sleeping room, outside each sleeping area and on each storey, and for carbon monoxide alarms outside sleeping areas where fuel is burned or a garage is attached. The local code decides where and how they are wired.',
+    systems: ['lighting', 'electrical', 'heating-cooling', 'water-heater'],
+    source: 'IRC R314 and R315; NFPA 72',
+  },
+  {
+    key: 'structure',
+    title: 'Bearing walls and structure',
+    text: 'A wall, post, joist, rafter or chimney may carry what cannot be seen from the room. Nothing that may bear is cut or removed before a licensed engineer has designed the support and the permit is issued. Cracks that grow, bowing walls and sagging floors go to the engineer first.',
+    systems: ['roof', 'foundation', 'crawl-space', 'floor-structure', 'inside-walls', 'egress', 'windows', 'outside-doors', 'site'],
+    source: 'IRC R301 and R602; state engineering practice acts',
+  },
+  {
+    key: 'falls',
+    title: 'Falls',
+    text: 'Roofs, ladders, scaffolds, open stairs and attic floors without boards kill. Hired crews work under the fall protection rules; own-hands work on a roof or above six feet is better hired. A soft or wet roof or deck is not walked on.',
+    systems: ['roof', 'roof-ventilation', 'siding', 'windows', 'insulation', 'floor-structure', 'site'],
+    source: '29 CFR 1926 subparts L, M and X',
+  },
+  {
+    key: 'confined-spaces',
+    title: 'Crawl spaces, attics and other confined spaces',
+    text: 'Bad air, live wires, sharp metal, animals and no second way out. Do not enter alone, or at all where there is standing water, sewage, a smell of gas or fresh damage; hired entry follows the confined space rules.',
+    systems: ['crawl-space', 'pests', 'insulation', 'roof-ventilation', 'foundation', 'supply-piping', 'drain-piping'],
+    source: '29 CFR 1926 subpart AA',
+  },
+  {
+    key: 'egress',
+    title: 'Escape from sleeping rooms',
+    text: 'The model code asks that a sleeping room have an opening to get out by: 5.7 sq ft clear (5.0 at grade), 24 in high, 20 in wide, sill at most 44 in. Numbers entered meet or do not meet the model code; the local code and the building official decide, for existing windows as well.',
+    systems: ['egress', 'windows'],
+    source: 'IRC R310',
+  },
+  {
+    key: 'digging',
+    title: 'Digging, trenches and sewers',
+    text: 'Have the state’s one-call center mark the utilities before any digging. Trenches cave in without warning: deep work is for an equipped crew. Have the lateral looked at by camera before it is priced for replacement, and treat sewage and sewer gas as harmful.',
+    systems: ['sewer', 'site', 'foundation', 'drain-piping', 'supply-piping'],
+    source: '49 CFR part 196; 29 CFR 1926 subpart P',
+  },
+  {
+    key: 'relief-valve',
+    title: 'Water heater safety',
+    text: 'A water heater without a working relief valve and discharge pipe can burst; one that vents badly gives off carbon monoxide. Do not test or plug an old valve: have a licensed plumber look at it.',
+    systems: ['water-heater'],
+    source: 'IRC P2804 and M2005; NFPA 54',
+  },
+  {
+    key: 'dust',
+    title: 'Silica dust',
+    text: 'Cutting or grinding masonry, concrete, tile and fiber-cement makes dust that scars lungs. Hired crews follow the silica rule; own-hands cutting is done wet, outside, with the mask that the maker names.',
+    systems: ['foundation', 'siding', 'bathroom', 'floors', 'kitchen', 'site'],
+    source: '29 CFR 1926.1153',
+  },
+]
