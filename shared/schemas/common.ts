@@ -11,14 +11,24 @@ export const LINE_MAX_CENTS = 100_000_000_000
 /** A unit price stays under one million dollars, in ten-thousandths of a dollar. */
 export const UNIT_PRICE_MAX_E4 = 10_000_000_000
 
-export const idSchema = z.string().min(1).max(64).regex(/^[A-Za-z0-9_-]+$/, 'is not an id')
+export const idSchema = z
+  .string()
+  .min(1)
+  .max(64)
+  .regex(/^[A-Za-z0-9_-]+$/, 'is not an id')
 /** Plain lower-case words joined by hyphens, groups parted by a slash: `floor/plank-vinyl`. */
-export const keySchema = z.string().min(1).max(80).regex(/^[a-z0-9]+(?:[-/][a-z0-9]+)*$/, 'use lower-case words joined by hyphens')
+export const keySchema = z
+  .string()
+  .min(1)
+  .max(80)
+  .regex(/^[a-z0-9]+(?:[-/][a-z0-9]+)*$/, 'use lower-case words joined by hyphens')
 export const nameSchema = z.string().trim().min(1, 'is empty').max(NAME_MAX)
 export const noteSchema = z.string().max(NOTE_MAX)
 export const versionSchema = z.int().min(1)
 export const isoDateSchema = z.iso.date()
 export const isoTimeSchema = z.iso.datetime()
+/** A new order of rooms or lines: the id of each, once. */
+export const orderSchema = z.strictObject({ ids: z.array(idSchema).max(10_000) })
 
 /** A length in inches, exact to 1/64 in. */
 export const lengthInSchema = z.number().positive('must be more than zero').max(LENGTH_MAX_IN)

@@ -43,7 +43,12 @@ export const estimateSettingsSchema = z.strictObject({
   permitsCents: amountCentsSchema,
   contingency: contingencySchema,
   ends: z.enum(['one-in-ten', 'limits']),
-  evidence: z.strictObject({ seen: evidenceFactorSchema, measured: evidenceFactorSchema, tested: evidenceFactorSchema, bid: evidenceFactorSchema }),
+  evidence: z.strictObject({
+    seen: evidenceFactorSchema,
+    measured: evidenceFactorSchema,
+    tested: evidenceFactorSchema,
+    bid: evidenceFactorSchema,
+  }),
   correlation: z.strictObject({ overall: z.number().min(0).max(1), withinTrade: z.number().min(0).max(1) }),
   draws: z.int().min(1000).max(1_000_000),
 })
@@ -119,6 +124,14 @@ export const estimateSchema = z.object({
 })
 export const estimatePatchSchema = z.strictObject({ name: nameSchema.optional(), settings: estimateSettingsSchema.partial().optional() })
 
+/** What a write to a line answers: the line as kept, and what the whole comes to with it. */
+export const savedLineSchema = z.object({ line: lineSchema, totals: totalsSchema, estimateVersion: versionSchema })
+export const orderedLinesSchema = z.object({
+  lines: z.array(z.object({ id: idSchema, position: z.int() })),
+  totals: totalsSchema,
+  estimateVersion: versionSchema,
+})
+
 /** Everything that the estimate page and the engine need, in one read. */
 export const estimateWholeSchema = z.object({
   estimate: estimateSchema,
@@ -136,6 +149,8 @@ export type LineFields = z.infer<typeof lineFieldsSchema>
 export type NewLine = z.infer<typeof newLineSchema>
 export type LinePatch = z.infer<typeof linePatchSchema>
 export type Line = z.infer<typeof lineSchema>
+export type SavedLine = z.infer<typeof savedLineSchema>
+export type OrderedLines = z.infer<typeof orderedLinesSchema>
 export type Totals = z.infer<typeof totalsSchema>
 export type Estimate = z.infer<typeof estimateSchema>
 export type EstimatePatch = z.infer<typeof estimatePatchSchema>

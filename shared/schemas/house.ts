@@ -39,6 +39,9 @@ export const houseSchema = houseFieldsSchema.extend({
   updatedAt: isoTimeSchema,
 })
 
+/** A house has its working estimate from the first moment. */
+export const addedHouseSchema = z.object({ house: houseSchema, estimateId: idSchema })
+
 /** A row of the house list: the house, its working estimate and the total kept with it. */
 export const houseSummarySchema = z.object({
   id: idSchema,
@@ -60,4 +63,5 @@ export type RoofGroup = z.infer<typeof roofGroupSchema>
 export type HouseFields = z.infer<typeof houseFieldsSchema>
 export type HousePatch = z.infer<typeof housePatchSchema>
 export type House = z.infer<typeof houseSchema>
+export type AddedHouse = z.infer<typeof addedHouseSchema>
 export type HouseSummary = z.infer<typeof houseSummarySchema>

@@ -1,12 +1,25 @@
 import { z } from 'zod'
-import { amountCentsSchema, isoDateSchema, keySchema, nameSchema, noteSchema, percentSchema, unitPriceRangeSchema, versionSchema } from './common.ts'
+import {
+  amountCentsSchema,
+  isoDateSchema,
+  keySchema,
+  nameSchema,
+  noteSchema,
+  percentSchema,
+  unitPriceRangeSchema,
+  versionSchema,
+} from './common.ts'
 import { SYSTEM_KEYS } from '../catalogue/houseSystems.ts'
 import { TRADE_KEYS } from '../catalogue/trades.ts'
 import { UNIT_KEYS } from '../catalogue/units.ts'
 
 export const FORMULA_MAX_CHARS = 500
 
-export const formulaTextSchema = z.string().trim().min(1, 'is empty').max(FORMULA_MAX_CHARS, `is longer than ${FORMULA_MAX_CHARS} characters`)
+export const formulaTextSchema = z
+  .string()
+  .trim()
+  .min(1, 'is empty')
+  .max(FORMULA_MAX_CHARS, `is longer than ${FORMULA_MAX_CHARS} characters`)
 
 /** What the admin keys of an item. Unit prices are in ten-thousandths of a dollar. */
 export const priceItemFieldsSchema = z
@@ -40,7 +53,13 @@ export const priceItemFieldsSchema = z
     priceDate: isoDateSchema,
     note: noteSchema,
   })
-  .refine((item) => item.materials !== null || item.installed !== null, { path: ['installed'], message: 'give a materials price, an installed price or both' })
+  .refine((item) => item.materials !== null || item.installed !== null, {
+    path: ['installed'],
+    message: 'give a materials price, an installed price or both',
+  })
+
+/** A change in a draft; the whole is checked again once it is merged. An item keeps its key. */
+export const priceItemPatchSchema = z.strictObject(priceItemFieldsSchema.shape).omit({ key: true }).partial()
 
 export const priceItemSchema = priceItemFieldsSchema.safeExtend({
   /** Version of this row, for If-Match while a draft is edited. */
@@ -55,6 +74,11 @@ export const regionSchema = z.strictObject({
   salesTaxRule: z.enum(['none', 'materials', 'whole-contract']),
   salesTaxPercent: percentSchema,
 })
+
+/** A region as one version of the book has it, with the row's version for If-Match. */
+export const priceRegionSchema = regionSchema.extend({ rowVersion: versionSchema })
+export const regionPatchSchema = regionSchema.omit({ key: true }).partial()
+export const publishSchema = z.strictObject({ note: noteSchema.trim().min(1, 'say what changed'), effectiveDate: isoDateSchema })
 
 /** An item as one region pays for it: the factors are already in. */
 export const regionalItemSchema = priceItemSchema
@@ -73,5 +97,8 @@ export const priceBookVersionSchema = z.object({
 
 export type PriceItemFields = z.infer<typeof priceItemFieldsSchema>
 export type PriceItem = z.infer<typeof priceItemSchema>
+export type PriceItemPatch = z.infer<typeof priceItemPatchSchema>
+export type PriceRegion = z.infer<typeof priceRegionSchema>
+export type RegionPatch = z.infer<typeof regionPatchSchema>
 export type Region = z.infer<typeof regionSchema>
 export type PriceBookVersion = z.infer<typeof priceBookVersionSchema>

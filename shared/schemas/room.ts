@@ -6,10 +6,7 @@ export const ROOM_OPENINGS_MAX = 60
 export const OPENING_COUNT_MAX = 200
 
 /** A point of a plan, `[x, y]` in inches. */
-export const cornerSchema = z.tuple([
-  z.number().min(-LENGTH_MAX_IN).max(LENGTH_MAX_IN),
-  z.number().min(-LENGTH_MAX_IN).max(LENGTH_MAX_IN),
-])
+export const cornerSchema = z.tuple([z.number().min(-LENGTH_MAX_IN).max(LENGTH_MAX_IN), z.number().min(-LENGTH_MAX_IN).max(LENGTH_MAX_IN)])
 
 export const rectangleShapeSchema = z.strictObject({
   kind: z.literal('rectangle'),
@@ -63,7 +60,19 @@ export const deductionSchema = z.strictObject({
   fromBase: z.boolean().default(true),
 })
 
-export const ROOM_USES = ['sleeping', 'living', 'dining', 'kitchen', 'bath', 'hall', 'laundry', 'storage', 'cellar', 'attic', 'other'] as const
+export const ROOM_USES = [
+  'sleeping',
+  'living',
+  'dining',
+  'kitchen',
+  'bath',
+  'hall',
+  'laundry',
+  'storage',
+  'cellar',
+  'attic',
+  'other',
+] as const
 
 /** What a person keys of a room. */
 export const roomFieldsSchema = z.strictObject({
@@ -76,6 +85,8 @@ export const roomFieldsSchema = z.strictObject({
   deductions: z.array(deductionSchema).max(ROOM_OPENINGS_MAX),
   note: noteSchema,
 })
+/** A new room. Below the named room; left out, at the end. */
+export const newRoomSchema = roomFieldsSchema.extend({ afterRoomId: idSchema.nullable().optional() })
 export const roomPatchSchema = roomFieldsSchema.partial()
 export const roomSchema = roomFieldsSchema.extend({
   id: idSchema,
@@ -83,6 +94,8 @@ export const roomSchema = roomFieldsSchema.extend({
   position: z.int(),
   version: versionSchema,
 })
+/** Its lines are removed with a room; restoring the room brings them back. */
+export const removedRoomSchema = z.object({ room: roomSchema, removedLineIds: z.array(idSchema) })
 
 export type Corner = z.infer<typeof cornerSchema>
 export type Shape = z.infer<typeof shapeSchema>
@@ -91,5 +104,7 @@ export type Opening = z.infer<typeof openingSchema>
 export type Deduction = z.infer<typeof deductionSchema>
 export type RoomUse = (typeof ROOM_USES)[number]
 export type RoomFields = z.infer<typeof roomFieldsSchema>
+export type NewRoom = z.infer<typeof newRoomSchema>
 export type RoomPatch = z.infer<typeof roomPatchSchema>
 export type Room = z.infer<typeof roomSchema>
+export type RemovedRoom = z.infer<typeof removedRoomSchema>
