@@ -16,6 +16,7 @@ export default defineConfig({
           environment: 'node',
           include: ['tests/{engine,api,checks,seed}/**/*.test.ts'],
           testTimeout: 20_000,
+          sequence: { groupOrder: 0 },
         },
       },
       {
@@ -25,6 +26,7 @@ export default defineConfig({
           environment: 'jsdom',
           include: ['tests/components/**/*.test.ts'],
           setupFiles: ['tests/support/componentsSetup.ts'],
+          sequence: { groupOrder: 0 },
         },
       },
       {
@@ -37,6 +39,7 @@ export default defineConfig({
           testTimeout: 120_000,
           hookTimeout: 120_000,
           fileParallelism: false,
+          sequence: { groupOrder: 1 },
         },
       },
     ],

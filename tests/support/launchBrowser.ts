@@ -1,7 +1,12 @@
 import { existsSync } from 'node:fs'
 import { chromium, type Browser } from 'playwright-core'
 
-const USUAL_PLACES = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome', '/Applications/Chromium.app/Contents/MacOS/Chromium']
+const USUAL_PLACES = [
+  '/usr/bin/chromium',
+  '/usr/bin/chromium-browser',
+  '/usr/bin/google-chrome',
+  '/Applications/Chromium.app/Contents/MacOS/Chromium',
+]
 
 /** Starts the Chromium of the machine, headless. `CHROMIUM_PATH` names one in an unusual place. */
 export async function launchBrowser(): Promise<Browser> {
