@@ -1,0 +1,37 @@
+/** Strokes on a grid of 24, drawn for this app. */
+export const ICONS = {
+  add: 'M12 5v14M5 12h14',
+  alert: 'M12 4 2.5 20h19L12 4Zm0 6v4.5m0 2.5v.5',
+  book: 'M5 4h11a3 3 0 0 1 3 3v13H8a3 3 0 0 1-3-3V4Zm0 13a3 3 0 0 1 3-3h11',
+  check: 'm5 12.5 4.5 4.5L19 7.5',
+  close: 'M6 6l12 12M18 6 6 18',
+  copy: 'M9 9h11v11H9zM15 9V4H4v11h5',
+  dark: 'M20 14.5A8.5 8.5 0 0 1 9.5 4a8.5 8.5 0 1 0 10.5 10.5Z',
+  down: 'M12 5v14m-6-6 6 6 6-6',
+  download: 'M12 4v11m-5-5 5 5 5-5M4 20h16',
+  edit: 'M4 20v-4L16 4l4 4L8 20H4Zm9-13 4 4',
+  grip: 'M9 6v.5M9 12v.5M9 18v.5M15 6v.5M15 12v.5M15 18v.5',
+  hide: 'M3 12s3.5-6 9-6 9 6 9 6-3.5 6-9 6-9-6-9-6Zm9 2.5a2.5 2.5 0 1 0 0-5 2.5 2.5 0 0 0 0 5ZM4 20 20 4',
+  house: 'M3 11 12 4l9 7M6 9v11h12V9M10 20v-6h4v6',
+  leave: 'M10 4H5v16h5m4-12 4 4-4 4m4-4H9',
+  light: 'M12 8a4 4 0 1 0 0 8 4 4 0 0 0 0-8Zm0-5v2m0 14v2M3 12h2m14 0h2M5.6 5.6 7 7m10 10 1.4 1.4M5.6 18.4 7 17M17 7l1.4-1.4',
+  mail: 'M3 6h18v12H3zM3 7l9 7 9-7',
+  menu: 'M4 7h16M4 12h16M4 17h16',
+  more: 'M5 12v.5M12 12v.5M19 12v.5',
+  next: 'm9 5 7 7-7 7',
+  open: 'm5 9 7 7 7-7',
+  people:
+    'M9 11a3.5 3.5 0 1 0 0-7 3.5 3.5 0 0 0 0 7Zm-6.5 9c0-4 3-6 6.5-6s6.5 2 6.5 6M16 4.5a3.5 3.5 0 0 1 0 6.3M18 14.5c2.2.8 3.5 2.7 3.5 5.5',
+  person: 'M12 11.5a4 4 0 1 0 0-8 4 4 0 0 0 0 8ZM4 20.5c0-4.5 3.6-6.5 8-6.5s8 2 8 6.5',
+  print: 'M7 9V4h10v5M7 17H4V9h16v8h-3M7 14h10v6H7z',
+  remove: 'M5 7h14M10 7V4h4v3m-7 0 1 13h8l1-13m-7 4v5m4-5v5',
+  search: 'M10.5 17a6.5 6.5 0 1 0 0-13 6.5 6.5 0 0 0 0 13Zm5-1.5L20 20',
+  share: 'M12 15V4m-4 4 4-4 4 4M5 12v8h14v-8',
+  show: 'M3 12s3.5-6 9-6 9 6 9 6-3.5 6-9 6-9-6-9-6Zm9 2.5a2.5 2.5 0 1 0 0-5 2.5 2.5 0 0 0 0 5Z',
+  system: 'M3 5h18v11H3zM8 20h8m-4-4v4',
+  undo: 'M8 5 4 9l4 4M4 9h10a5.5 5.5 0 0 1 0 11h-3',
+  up: 'M12 19V5m-6 6 6-6 6 6',
+  upload: 'M12 16V5M7 10l5-5 5 5M4 20h16',
+} as const
+
+export type IconName = keyof typeof ICONS

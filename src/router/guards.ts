@@ -1,0 +1,52 @@
+import type { App } from 'vue'
+import type { RouteLocationNormalized, Router } from 'vue-router'
+import { onSignedOut } from '../api/http.ts'
+import { useSessionStore } from '../stores/session.ts'
+
+const SIGNED_OUT_NOTICE = 'You were signed out. Sign in to go on where you were.'
+
+/** Sends people who aren't signed in to the sign-in and back, and keeps from each role the pages that aren't theirs. */
+export function guardRoutes(router: Router, app: App): void {
+  const session = useSessionStore()
+
+  router.beforeEach(async (to) => {
+    if (to.meta.isPublic) return true
+    await session.load()
+    if (!session.isSignedIn) return signInAnd(to)
+    await loadSignedInParts(app)
+    if (to.meta.action && !session.may(to.meta.action)) return missing(to)
+    if (to.name === 'house') return { name: firstHousePage(session.may('room.write')), params: to.params, replace: true }
+    return true
+  })
+
+  router.afterEach((to) => {
+    document.title = to.meta.title ? `${to.meta.title} · Quoinbook` : 'Quoinbook'
+  })
+
+  onSignedOut(() => {
+    if (!session.isSignedIn) return
+    session.leave(SIGNED_OUT_NOTICE)
+    void router.push(signInAnd(router.currentRoute.value))
+  })
+}
+
+function signInAnd(wanted: RouteLocationNormalized) {
+  return { name: 'sign-in', query: wanted.path === '/' ? {} : { next: wanted.fullPath } }
+}
+
+/** The address stays as it was typed. */
+function missing(to: RouteLocationNormalized) {
+  return { name: 'not-found', params: { pathMatch: to.path.slice(1).split('/') }, query: to.query, hash: to.hash }
+}
+
+function firstHousePage(mayKeyRooms: boolean) {
+  return mayKeyRooms ? 'rooms' : 'summary'
+}
+
+let signedInParts: Promise<void> | null = null
+
+/** Keeps PrimeVue and its theme off the pages before the sign-in. */
+function loadSignedInParts(app: App): Promise<void> {
+  signedInParts ??= import('../assets/installPrimeVue.ts').then(({ installPrimeVue }) => installPrimeVue(app))
+  return signedInParts
+}

@@ -1,0 +1,35 @@
+import { config } from '@vue/test-utils'
+import PrimeVue from 'primevue/config'
+import { afterEach, beforeEach, vi, type MockInstance } from 'vitest'
+
+config.global.plugins.push([PrimeVue, { unstyled: true }])
+
+// jsdom has no layout, so it has none of these; overlays ask for them.
+window.matchMedia ??= (query: string) =>
+  ({
+    matches: false,
+    media: query,
+    addEventListener() {},
+    removeEventListener() {},
+    addListener() {},
+    removeListener() {},
+  }) as unknown as MediaQueryList
+window.ResizeObserver ??= class {
+  observe() {}
+  unobserve() {}
+  disconnect() {}
+}
+
+// A warning of Vue's or an error in the console is a defect that the assertions didn't look for.
+let consoleSpies: MockInstance[] = []
+beforeEach(() => {
+  consoleSpies = [vi.spyOn(console, 'error'), vi.spyOn(console, 'warn')].map((spy) =>
+    spy.mockImplementation((...words: unknown[]) => {
+      throw new Error(`Unexpected in the console: ${words.map(String).join(' ')}`)
+    }),
+  )
+})
+afterEach(() => {
+  for (const spy of consoleSpies) spy.mockRestore()
+  document.body.innerHTML = ''
+})
