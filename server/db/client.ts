@@ -12,10 +12,32 @@ export function databaseOver(connection: BetterSqlite3.Database): Database {
   return drizzle(connection)
 }
 
+/** What waits for the commit of a connection's outermost transaction. */
+const waitingActions = new WeakMap<BetterSqlite3.Database, (() => void)[]>()
+
 /**
- * Runs a write as one transaction, begun IMMEDIATE so that two writers never meet half-way.
+ * Runs a write as one transaction, begun IMMEDIATE so that two writers never meet half-way. Inside another it is a part of that one.
  * The callback is synchronous: an async one would commit before its work was done.
  */
 export function inWriteTransaction<T>(db: Database, write: (tx: Transaction) => T extends Promise<unknown> ? never : T): T {
-  return db.transaction(write as (tx: Transaction) => T, { behavior: 'immediate' })
+  const run = () => db.transaction(write as (tx: Transaction) => T, { behavior: 'immediate' })
+  const isPartOfAnother = db.$client.inTransaction
+  if (isPartOfAnother) return run()
+  const actions: (() => void)[] = []
+  waitingActions.set(db.$client, actions)
+  let answer: T
+  try {
+    answer = run()
+  } finally {
+    waitingActions.delete(db.$client)
+  }
+  for (const action of actions) action()
+  return answer
+}
+
+/** Runs an action once the write that is under way is committed, at once when there is none, and never when it was rolled back. */
+export function afterCommit(db: Database, action: () => void): void {
+  const actions = waitingActions.get(db.$client)
+  if (actions) actions.push(action)
+  else action()
 }

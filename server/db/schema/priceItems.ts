@@ -52,7 +52,10 @@ export const priceItems = sqliteTable(
     // The rows of a version: one range of from_version, the end read from the index.
     index('price_items_version').on(table.regionKey, table.fromVersion, table.untilVersion),
     // One item through its versions.
-    uniqueIndex('price_items_key').on(table.key, sql`ifnull(${table.regionKey}, '')`, table.fromVersion),
+    uniqueIndex('price_items_key')
+      .on(table.key, table.fromVersion)
+      .where(sql`${table.regionKey} is null`),
+    uniqueIndex('price_items_region_key').on(table.key, table.regionKey, table.fromVersion),
     // Rows that a version ended, for what changed in it.
     index('price_items_until').on(table.untilVersion),
   ],
