@@ -1,26 +1,41 @@
 import express, { type Express } from 'express'
 import type { Logger } from 'pino'
+import packageInfo from '../package.json' with { type: 'json' }
 import type { AppConfig } from './config/appConfig.ts'
 import type { Clock } from './config/clock.ts'
 import type { Database } from './db/client.ts'
+import { createAccountServices } from './features/accounts/accountServices.ts'
+import type { PasswordHasher } from './features/accounts/passwordHasher.ts'
+import { passwordOperations } from './features/accounts/passwordRoutes.ts'
+import { personOperations } from './features/accounts/personRoutes.ts'
+import { sessionOperations } from './features/accounts/sessionRoutes.ts'
 import { createSessionService } from './features/accounts/sessionService.ts'
 import { createEventHub, type EventHub } from './features/events/eventHub.ts'
 import { eventOperations } from './features/events/eventRoutes.ts'
 import { firmOperations } from './features/firm/firmRoutes.ts'
 import { healthOperations } from './features/health/healthRoutes.ts'
+import { openApiOperations } from './features/health/openApiRoutes.ts'
+import { outboxOperations } from './features/outbox/outboxRoutes.ts'
 import { apiRouter } from './http/apiRouter.ts'
 import type { Operation } from './http/operation.ts'
 import type { MailSender } from './mail/mailSender.ts'
+import { compressResponses } from './middleware/compressResponses.ts'
 import { errorHandler } from './middleware/errorHandler.ts'
 import { createIdempotency } from './middleware/idempotency.ts'
+import { limitByAddress } from './middleware/rateLimit.ts'
 import { requestLog } from './middleware/requestLog.ts'
 import { sameOrigin } from './middleware/sameOrigin.ts'
+import { securityHeaders } from './middleware/securityHeaders.ts'
+import { serveClient } from './middleware/serveClient.ts'
 import { session } from './middleware/session.ts'
+
+const MINUTE_MS = 60_000
 
 export interface AppParts {
   db: Database
   clock: Clock
   mail: MailSender
+  hasher: PasswordHasher
   config: AppConfig
   logger: Logger
 }
@@ -33,12 +48,24 @@ export interface BuiltApp {
 }
 
 /** Puts the app together; `index.ts` lets it listen, tests call it in their own process. */
-export function buildApp({ db, clock, mail, config, logger }: AppParts): BuiltApp {
+export function buildApp(parts: AppParts): BuiltApp {
+  const { db, clock, config, logger } = parts
   const events = createEventHub()
   const sessions = createSessionService({ db, clock, onEnd: (end) => events.endSession(end) })
-  const services = { db, clock, mail, config, events, sessions }
+  const accounts = createAccountServices({ ...parts, events, sessions })
+  const accountLimit = limitByAddress({ limit: config.limits.accountsPerQuarterHour, windowMs: 15 * MINUTE_MS })
+  const services = { ...parts, events, sessions, accounts, accountLimit }
 
-  const operations = [...healthOperations(services), ...firmOperations(services), ...eventOperations(services)]
+  const described = [
+    ...healthOperations(services),
+    ...firmOperations(services),
+    ...sessionOperations(services),
+    ...passwordOperations(services),
+    ...personOperations(services),
+    ...outboxOperations(services),
+    ...eventOperations(services),
+  ]
+  const operations = [...described, ...openApiOperations(described, packageInfo.version)]
 
   const app = express()
   app.disable('x-powered-by')
@@ -46,12 +73,16 @@ export function buildApp({ db, clock, mail, config, logger }: AppParts): BuiltAp
   app.set('query parser', 'simple')
   app.set('trust proxy', config.trustProxy)
   app.use(requestLog(logger))
+  app.use(securityHeaders({ isHttps: config.appUrl.startsWith('https:') }))
+  app.use(compressResponses())
   app.use(
     '/api',
+    limitByAddress({ limit: config.limits.apiPerMinute, windowMs: MINUTE_MS }),
     sameOrigin(config.appUrl),
     session(sessions),
     apiRouter(operations, { idempotency: createIdempotency({ db, clock }), checkAnswers: config.checkAnswers }),
   )
+  if (config.clientFolder !== null) app.use(serveClient(config.clientFolder))
   app.use(errorHandler)
   return { app, operations, events }
 }

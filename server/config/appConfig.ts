@@ -12,8 +12,6 @@ export interface AppConfig {
   trustProxy: boolean | number | string
   /** Mail goes to the outbox that the admin reads in the app. */
   hasOutbox: boolean
-  /** bcrypt's cost: 2 to this power rounds. */
-  passwordCost: number
   /** Requests that one address may send. */
   limits: {
     apiPerMinute: number

@@ -9,7 +9,7 @@ export function sendAnswer(res: Response, status: number, answer: unknown): void
     res.attachment(answer.fileName).type(answer.mediaType).send(answer.content)
     return
   }
-  if (status === 204) {
+  if (answer === undefined) {
     res.end()
     return
   }

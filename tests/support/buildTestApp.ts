@@ -4,6 +4,7 @@ import { buildApp } from '../../server/app.ts'
 import type { AppConfig } from '../../server/config/appConfig.ts'
 import { migrate } from '../../server/db/migrate.ts'
 import { openDatabase } from '../../server/db/openDatabase.ts'
+import { createPasswordHasherHere } from '../../server/features/accounts/passwordHasher.ts'
 import { createSessionService } from '../../server/features/accounts/sessionService.ts'
 import type { MailMessage } from '../../server/mail/mailSender.ts'
 import type { Role } from '../../shared/schemas/account.ts'
@@ -16,13 +17,14 @@ const TEST_CONFIG: AppConfig = {
   sessionSecret: 'a secret that only the tests know, long enough to sign with',
   trustProxy: false,
   hasOutbox: true,
-  // The least that bcrypt takes: the tests are about what happens around a hash.
-  passwordCost: 4,
   limits: { apiPerMinute: 100_000, accountsPerQuarterHour: 100_000 },
   checkAnswers: true,
   clientFolder: null,
   demoAccounts: [],
 }
+
+/** The least cost that bcrypt takes: the tests are about what happens around a hash. */
+const hasher = createPasswordHasherHere(4)
 
 export type TestApp = ReturnType<typeof buildTestApp>
 export type SignedIn = { user: TestUser; agent: ReturnType<typeof request.agent> }
@@ -42,7 +44,7 @@ export function buildTestApp(overrides: Partial<AppConfig> = {}) {
     },
   }
   const config = { ...TEST_CONFIG, ...overrides }
-  const { app, operations, events } = buildApp({ db, clock, mail, config, logger: pino({ level: 'silent' }) })
+  const { app, operations, events } = buildApp({ db, clock, mail, hasher, config, logger: pino({ level: 'silent' }) })
   const sessions = createSessionService({ db, clock, onEnd: (end) => events.endSession(end) })
 
   /** An agent that holds a session of this person. */

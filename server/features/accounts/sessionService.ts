@@ -59,7 +59,13 @@ export function createSessionService({ db, clock, onEnd }: { db: Database; clock
       onEnd({ userId: session.user.id, idHash: session.idHash, exceptIdHash: null })
     },
 
-    /** Ends all sessions of a person at once, but for one that may stay. Their event streams close with them. */
+    /** Ends all sessions of a person, on every device. */
+    endEverySessionOf(userId: string): void {
+      deleteSessionsOf(db, userId, null)
+      onEnd({ userId, idHash: null, exceptIdHash: null })
+    },
+
+    /** The same within a write, but for one that may stay. Their event streams close with them. */
     endAllOf(tx: Queryable, userId: string, exceptIdHash: string | null = null): void {
       deleteSessionsOf(tx, userId, exceptIdHash)
       onEnd({ userId, idHash: null, exceptIdHash })
