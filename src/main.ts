@@ -1,9 +1,9 @@
+import './assets/base.css'
 import { VueQueryPlugin } from '@tanstack/vue-query'
 import { createPinia } from 'pinia'
 import { createApp } from 'vue'
 import { queryClient } from './api/queryClient.ts'
 import App from './App.vue'
-import './assets/base.css'
 import { createAppRouter } from './router/index.ts'
 
 const app = createApp(App)
