@@ -22,7 +22,7 @@ export function priceTable(defaults: TableDefaults, table: string): PriceItemFie
   return readTable(table).map((row) => readItem(defaults, row))
 }
 
-function readItem(defaults: TableDefaults, { cell, note }: TableRow): PriceItemFields {
+function readItem(defaults: TableDefaults, { cell, notes }: TableRow): PriceItemFields {
   const [packageSize, ...packageWords] = cell('package').split(' ')
   const item = priceItemFieldsSchema.safeParse({
     ...defaults,
@@ -40,7 +40,7 @@ function readItem(defaults: TableDefaults, { cell, note }: TableRow): PriceItemF
     hoursPerUnit: Number(cell('hours')),
     roomFormula: cell('room formula') || null,
     houseFormula: cell('house formula') || null,
-    note,
+    note: notes.join(' '),
   })
   if (!item.success) throw new Error(`Price table row ${cell('key')}: ${item.error.message}`)
   return item.data

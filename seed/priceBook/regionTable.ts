@@ -17,11 +17,11 @@ const baseItemByKey = new Map(priceItems.map((item) => [item.key, item]))
  * @throws Error that names a key which the base rows don't have.
  */
 export function regionTable(regionKey: string, priceDate: string, table: string): RegionItem[] {
-  return readTable(table).map(({ cell, note }) => {
+  return readTable(table).map(({ cell, notes }) => {
     const base = baseItemByKey.get(cell('key'))
     if (!base) throw new Error(`Region table row ${cell('key')}: no such item among the base rows`)
     const materials = readPrice(cell('own hands'))
     const installed = readPrice(cell('hired'))
-    return { regionKey, item: { ...base, materials, installed, priceDate, note: `${base.note} ${note}` } }
+    return { regionKey, item: { ...base, materials, installed, priceDate, note: [base.note, ...notes].join(' ') } }
   })
 }

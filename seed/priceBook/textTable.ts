@@ -3,11 +3,12 @@ import type { LowLikelyHigh } from '../../shared/schemas/common.ts'
 export interface TableRow {
   /** The text of the row in the column of that name, `''` where it has none. */
   cell: (column: string) => string
-  note: string
+  /** The lines below the row. */
+  notes: string[]
 }
 
 /**
- * Rows of a text table: the header's names give the columns, a line without a `|` is the note of the row above it.
+ * Rows of a text table: the header's names give the columns, lines without a `|` are notes of the row above them.
  *
  * @throws Error that names a row with a cell too few or too many.
  */
@@ -19,7 +20,7 @@ export function readTable(table: string): TableRow[] {
     const isNote = !line.includes('|')
     const rowAbove = rows.at(-1)
     if (!isNote) rows.push(rowOf(columns, cellsOf(line)))
-    else if (rowAbove) rowAbove.note = line.trim()
+    else rowAbove?.notes.push(line.trim())
   }
   return rows
 }
@@ -37,5 +38,5 @@ function cellsOf(line: string): string[] {
 
 function rowOf(columns: readonly string[], cells: readonly string[]): TableRow {
   if (cells.length !== columns.length) throw new Error(`Table row ${cells[0]}: ${cells.length} cells below ${columns.length} columns`)
-  return { cell: (column) => cells[columns.indexOf(column)] ?? '', note: '' }
+  return { cell: (column) => cells[columns.indexOf(column)] ?? '', notes: [] }
 }
