@@ -3,15 +3,22 @@ import { onBeforeUnmount, onMounted } from 'vue'
 import { readCurrentUser } from '../api/accounts.ts'
 import { useSessionStore } from '../stores/session.ts'
 
-interface LiveEvent {
+export interface LiveEvent {
   type: 'house' | 'estimate' | 'price-book' | 'people'
   id: string
   version: number
 }
 
 const REOPEN_MS = 5_000
+const listeners = new Set<(event: LiveEvent) => void>()
 /** Lists in which a thing of this type shows. */
 const LISTS: Record<LiveEvent['type'], string[]> = { house: ['houses'], estimate: ['houses'], 'price-book': [], people: [] }
+
+/** Hears each live event as it comes, for a page that keeps its own copy of what it shows; answers with the way to stop. */
+export function onLiveEvent(listener: (event: LiveEvent) => void): () => void {
+  listeners.add(listener)
+  return () => listeners.delete(listener)
+}
 
 /**
  * Listens to what others change while the caller is mounted, and has the screens that show it read again.
@@ -32,6 +39,7 @@ export function useLiveEvents(onSignedOut: () => void): void {
 
   function follow(event: LiveEvent | null): void {
     if (!event) return
+    for (const listener of listeners) listener(event)
     const isPerThing = event.type === 'house' || event.type === 'estimate'
     void queries.invalidateQueries({ queryKey: isPerThing ? [event.type, event.id] : [event.type] })
     for (const list of LISTS[event.type]) void queries.invalidateQueries({ queryKey: [list] })
