@@ -186,4 +186,12 @@ const lanternPaperwork = lineTable(`
   house          | job/final-clean                   | living_area       | hired     | measured |
 `)
 
-export const lanternStreetLines = [...lanternOutside, ...lanternOpenings, ...lanternBelow, ...lanternServices, ...lanternRooms, ...lanternWetRooms, ...lanternPaperwork]
+export const lanternStreetLines = [
+  ...lanternOutside,
+  ...lanternOpenings,
+  ...lanternBelow,
+  ...lanternServices,
+  ...lanternRooms,
+  ...lanternWetRooms,
+  ...lanternPaperwork,
+]
