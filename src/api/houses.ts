@@ -24,9 +24,9 @@ export function addHouse(fields: HouseFields): Promise<AddedHouse> {
   return http.post<AddedHouse>('/houses', fields)
 }
 
-/** Throws a stale `ProblemError` whose `current` is the house as somebody else left it. */
+/** Throws a stale `ProblemError` whose `current` is the house as somebody else left it. Outlives a page that is left at once. */
 export function updateHouse(house: Pick<House, 'id' | 'version'>, patch: HousePatch): Promise<House> {
-  return http.patch<House>(`/houses/${house.id}`, patch, { ifMatch: house.version })
+  return http.patch<House>(`/houses/${house.id}`, patch, { ifMatch: house.version, keepalive: true })
 }
 
 export async function removeHouse(houseId: string): Promise<void> {

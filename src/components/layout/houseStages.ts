@@ -29,8 +29,8 @@ function detailsState(house: House | undefined): Standing {
   if (!house) return { state: 'empty', says: '' }
   const measured = [house.footprint !== null, house.wallHeightIn !== null, house.roof.length > 0]
   if (measured.every(Boolean)) return { state: 'done', says: 'measured' }
-  if (measured.some(Boolean)) return { state: 'under-way', says: 'part measured' }
-  return { state: 'empty', says: 'no outside measures' }
+  if (measured.some(Boolean)) return { state: 'under-way', says: 'in part' }
+  return { state: 'empty', says: 'to measure' }
 }
 
 function roomsState(summary: HouseSummary | undefined): Standing {
@@ -40,16 +40,16 @@ function roomsState(summary: HouseSummary | undefined): Standing {
 
 function estimateState(summary: HouseSummary | undefined): Standing {
   if (!summary) return { state: 'empty', says: '' }
-  if (summary.lineCount === 0) return { state: 'empty', says: 'no lines yet' }
-  if (summary.errorCount > 0) return { state: 'under-way', says: `${summary.errorCount} to put right` }
+  if (summary.lineCount === 0) return { state: 'empty', says: 'no lines' }
+  if (summary.errorCount > 0) return { state: 'under-way', says: counted(summary.errorCount, 'error') }
   return { state: 'done', says: counted(summary.lineCount, 'line') }
 }
 
 function summaryState(summary: HouseSummary | undefined): Standing {
   if (!summary) return { state: 'empty', says: '' }
-  if (summary.lineCount === 0) return { state: 'empty', says: 'nothing to sum' }
-  if (summary.errorCount > 0) return { state: 'under-way', says: 'leaves lines out' }
-  return { state: 'done', says: 'whole' }
+  if (summary.lineCount === 0) return { state: 'empty', says: 'no lines' }
+  if (summary.errorCount > 0) return { state: 'under-way', says: `${summary.errorCount} left out` }
+  return { state: 'done', says: 'complete' }
 }
 
 function counted(count: number, noun: string): string {
