@@ -1,12 +1,20 @@
-import type { Basis, Evidence, LineFields, PriceOverride } from '../../shared/schemas/estimate.ts'
-import { readPrice, readTable } from '../priceBook/textTable.ts'
-import { priceItems } from '../priceBook/priceItems.ts'
+import { BASES, EVIDENCE_MARKS, type Basis, type Evidence, type PriceOverride } from '../../shared/schemas/estimate.ts'
+import { readPrice, readTable, type TableRow } from '../priceBook/textTable.ts'
 
-/** A line of a demo estimate: its room by key, all that comes from the item filled in. */
-export type DemoLine = Omit<LineFields, 'roomId'> & { roomKey: string | null }
+/** What a person keys of a line; the rest comes along with the item. */
+export interface DemoLine {
+  /** `null`: the house as a whole. */
+  roomKey: string | null
+  itemKey: string
+  /** `null`: the item's own formula. */
+  quantity: string | null
+  basis: Basis
+  evidence: Evidence
+  override: PriceOverride | null
+  note: string
+}
 
-const WHO_BY_WORDS: Record<string, Basis> = { 'own hands': 'own-hands', hired: 'hired' }
-const itemByKey = new Map(priceItems.map((item) => [item.key, item]))
+const HOUSE = 'house'
 const REASON_MARK = 'because '
 
 /**
@@ -17,36 +25,27 @@ const REASON_MARK = 'because '
  * @throws Error that names the row which can't be read.
  */
 export function lineTable(table: string): DemoLine[] {
-  return readTable(table).map(({ cell, notes }) => {
-    const item = itemByKey.get(cell('item'))
-    const basis = WHO_BY_WORDS[cell('by')]
-    if (!item || !basis) throw new Error(`Line ${cell('room')} ${cell('item')}: no such item, or nobody does it`)
-    const isOfHouse = cell('room') === 'house'
-    const formula = cell('quantity') || (isOfHouse ? item.houseFormula : item.roomFormula)
-    if (!formula) throw new Error(`Line ${cell('room')} ${cell('item')}: needs a quantity`)
+  return readTable(table).map((row) => {
+    const { cell, notes } = row
+    const basis = BASES.find((known) => known === cell('by').replace(' ', '-'))
+    const evidence = EVIDENCE_MARKS.find((known) => known === cell('evidence'))
+    if (!basis || !evidence) throw new Error(`Line ${cell('room')} ${cell('item')}: who does it, or how it is known, can't be read`)
     return {
-      roomKey: isOfHouse ? null : cell('room'),
-      itemKey: item.key,
-      system: item.system,
-      trade: item.trade,
-      description: item.name,
-      unit: item.unit,
-      quantity: formula,
-      wastePercent: item.wastePercent,
-      packageSize: item.packageSize,
+      roomKey: cell('room') === HOUSE ? null : cell('room'),
+      itemKey: cell('item'),
+      quantity: cell('quantity') || null,
       basis,
-      override: readOverride(cell('own price'), notes),
-      minimumChargeCents: item.minimumChargeCents,
-      hoursPerUnit: item.hoursPerUnit,
-      evidence: cell('evidence') as Evidence,
+      evidence,
+      override: readOverride(row),
       note: notes.filter((note) => !note.startsWith(REASON_MARK)).join(' '),
     }
   })
 }
 
-function readOverride(ownPrice: string, notes: string[]): PriceOverride | null {
-  const price = readPrice(ownPrice)
+function readOverride({ cell, notes }: TableRow): PriceOverride | null {
+  const price = readPrice(cell('own price'))
   const reason = notes.find((note) => note.startsWith(REASON_MARK))?.slice(REASON_MARK.length)
-  if (price === null || reason === undefined) return null
+  if (price === null) return null
+  if (reason === undefined) throw new Error(`Line ${cell('room')} ${cell('item')}: an own price needs its reason`)
   return { price, reason: reason.charAt(0).toUpperCase() + reason.slice(1) }
 }

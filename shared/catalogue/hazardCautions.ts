@@ -1,4 +1,4 @@
-import type { Caution } from './cautions.ts'
+import type { Caution } from './caution.ts'
 
 /** What is in the house already and harms whoever disturbs it or lives with it. */
 export const HAZARD_CAUTIONS: readonly Caution[] = [

@@ -1,4 +1,4 @@
-import type { Caution } from './cautions.ts'
+import type { Caution } from './caution.ts'
 
 /** What the work itself can do to whoever carries it out, and to the house around it. */
 export const WORK_CAUTIONS: readonly Caution[] = [
