@@ -46,8 +46,8 @@ export function newIdempotencyKey(): string {
 
 async function send<T>(method: Method, path: string, body: unknown, options: RequestOptions = {}): Promise<T> {
   const answer = await request(method, path, body, options)
-  if (answer.status === 204 || answer.headers.get('content-length') === '0') return undefined as T
-  return (await answer.json()) as T
+  const text = await answer.text()
+  return (text === '' ? undefined : JSON.parse(text)) as T
 }
 
 /** A file that the server makes: its content and the name it should be saved under. */

@@ -11,7 +11,8 @@ const FRESH_MS = 30_000
  */
 export const queryClient = new QueryClient({
   defaultOptions: {
-    queries: { staleTime: FRESH_MS, retry: (failures, error) => failures < RETRIES_MAX && isWorthRetrying(error) },
+    // Reading goes on while the browser thinks itself offline: it may be wrong, and a failure in words is better than waiting without an end.
+    queries: { networkMode: 'always', staleTime: FRESH_MS, retry: (failures, error) => failures < RETRIES_MAX && isWorthRetrying(error) },
     // A write that fails for want of a connection says so at once: what was typed is still on the screen.
     mutations: { retry: false, networkMode: 'always' },
   },

@@ -2,6 +2,7 @@ import type { App } from 'vue'
 import type { RouteLocationNormalized, Router } from 'vue-router'
 import { onSignedOut } from '../api/http.ts'
 import { useSessionStore } from '../stores/session.ts'
+import { navigationProblem } from './navigationProblem.ts'
 
 const SIGNED_OUT_NOTICE = 'You were signed out. Sign in to go on where you were.'
 
@@ -19,7 +20,12 @@ export function guardRoutes(router: Router, app: App): void {
     return true
   })
 
+  router.onError((error: unknown, to) => {
+    navigationProblem.value = { error, wanted: to.fullPath }
+  })
+
   router.afterEach((to) => {
+    navigationProblem.value = null
     document.title = to.meta.title ? `${to.meta.title} · Quoinbook` : 'Quoinbook'
   })
 
