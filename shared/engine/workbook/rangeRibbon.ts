@@ -1,0 +1,28 @@
+const LINE = '─'
+const TICK = '┃'
+
+/** Cells of a range, as a formula on their sheet writes them. */
+interface RibbonCells {
+  low: string
+  likely: string
+  high: string
+  /** What the right end of the ribbon stands for. */
+  most: string
+}
+
+/**
+ * A formula that draws low to high as a run of strokes with a tick at likely, `width` characters for the most.
+ * Text rather than a chart: it recalculates, prints in grey and is read aloud by nothing that the figures beside it don't say.
+ */
+export function ribbonFormula({ low, likely, high, most }: RibbonCells, width: number): string {
+  const at = (cell: string) => `ROUND(${cell}/${most}*${width},0)`
+  const run = (from: string, to: string) => `REPT("${LINE}",${at(to)}-${at(from)})`
+  return `IF(${most}<=0,"",REPT(" ",${at(low)})&${run(low, likely)}&"${TICK}"&${run(likely, high)})`
+}
+
+/** What the formula draws now. */
+export function ribbonText(range: { low: number; likely: number; high: number }, most: number, width: number): string {
+  if (most <= 0) return ''
+  const at = (value: number) => Math.round((value / most) * width)
+  return ' '.repeat(at(range.low)) + LINE.repeat(at(range.likely) - at(range.low)) + TICK + LINE.repeat(at(range.high) - at(range.likely))
+}
