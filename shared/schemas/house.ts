@@ -15,6 +15,8 @@ export const roofGroupSchema = z.strictObject({
   kind: z.enum(ROOF_KINDS),
   /** Inches of rise in 12 inches of run. */
   rise: z.number().min(0, 'must not be negative').max(ROOF_RISE_MAX, `must be at most ${ROOF_RISE_MAX} in 12`),
+  /** Part of the plan that this group covers. Left out, groups share equally what the others leave. All together cover 100. */
+  sharePercent: z.number().positive('must be more than zero').max(100, 'must be at most 100').optional(),
 })
 
 export const houseFieldsSchema = z.strictObject({
