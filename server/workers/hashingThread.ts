@@ -12,13 +12,14 @@ export function startHashingThread(cost: number): PasswordHasher & { stop(): Pro
   const worker = startWorker(new URL('./hashingWorker.ts', import.meta.url), { cost })
   let lastId = 0
 
-  worker.unref()
   worker.on('message', ({ id, result }: HashJobDone) => {
     waiting.get(id)?.resolve(result)
     waiting.delete(id)
   })
   worker.on('error', failAll)
   worker.on('exit', () => failAll(new Error('The hashing thread ended.')))
+  // After the listeners, which would hold the process open again.
+  worker.unref()
 
   function failAll(error: Error): void {
     for (const job of waiting.values()) job.reject(error)

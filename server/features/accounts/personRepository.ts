@@ -89,3 +89,8 @@ export function hasOtherActiveAdmin(db: Queryable, id: string): boolean {
     .get()
   return (row?.others ?? 0) > 0
 }
+
+/** Whether anybody has an account: an empty file is one that nobody uses yet. */
+export function hasPeople(db: Queryable): boolean {
+  return db.select({ id: users.id }).from(users).limit(1).get() !== undefined
+}
