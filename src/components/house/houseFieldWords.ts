@@ -1,4 +1,4 @@
-import { formatLength } from '../../../shared/engine/index.ts'
+import { formatLength } from '../../../shared/engine/units/formatLength.ts'
 
 const TITLES: Record<string, string> = {
   name: 'The name',
