@@ -1,4 +1,4 @@
-import { config } from '@vue/test-utils'
+import { config, enableAutoUnmount } from '@vue/test-utils'
 import PrimeVue from 'primevue/config'
 import { afterEach, beforeEach, vi, type MockInstance } from 'vitest'
 
@@ -33,3 +33,6 @@ afterEach(() => {
   for (const spy of consoleSpies) spy.mockRestore()
   document.body.innerHTML = ''
 })
+
+// Last, because what is set up last is taken down first: a component goes before the document that it stands in.
+enableAutoUnmount(afterEach)
