@@ -68,7 +68,7 @@ CREATE TABLE `houses` (
 	`removed_at` text
 );
 --> statement-breakpoint
-CREATE INDEX `houses_removed_updated` ON `houses` (`removed_at`,`updated_at`);--> statement-breakpoint
+CREATE INDEX `houses_removed` ON `houses` (`removed_at`);--> statement-breakpoint
 CREATE TABLE `house_shares` (
 	`house_id` text NOT NULL,
 	`user_id` text NOT NULL,

@@ -23,6 +23,6 @@ export const houses = sqliteTable(
     updatedAt: text('updated_at').notNull(),
     removedAt: text('removed_at'),
   },
-  // The house list, newest work first.
-  (table) => [index('houses_removed_updated').on(table.removedAt, table.updatedAt)],
+  // The house list leaves out what was removed.
+  (table) => [index('houses_removed').on(table.removedAt)],
 )
