@@ -12,7 +12,7 @@ export const lanternStreet: DemoHouse = {
     address: '14 Lantern Street, Merrow Mills, Merrow Valley',
     regionKey: 'merrow-valley',
     yearBuilt: 1926,
-    storeys: 1.5,
+    storeys: 1,
     kind: 'detached',
     footprint: rectangle(`42'`, `28'`),
     wallHeightIn: outside(`9' 4"`),
@@ -21,9 +21,6 @@ export const lanternStreet: DemoHouse = {
     note: 'Demo: all invented. Brick to the eave, frame gables. Textured ceilings in the living room and the dining room, left undisturbed until tested.',
   },
   rooms: [
-    room('porch', 'Front porch', 'other', rectangle(`24'`, `7' 2"`), null, {
-      note: 'Open porch under the main roof; no ceiling height keyed.',
-    }),
     room('living', 'Living room', 'living', rectangle(`18' 4"`, `13' 6"`), flat(`8' 6"`), {
       openings: [door(`3'`, `6' 8"`), cased(`6'`, `7'`), cased(`3'`, `7'`), window(`3'`, `5'`, 3)],
       deductions: [builtIn(`5' 6"`, `4' 8"`, `1' 4"`)],

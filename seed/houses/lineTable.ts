@@ -1,11 +1,14 @@
-import { BASES, EVIDENCE_MARKS, type Basis, type Evidence, type PriceOverride } from '../../shared/schemas/estimate.ts'
+import { BASES, EVIDENCE_MARKS, type Basis, type Evidence, type LineFields, type PriceOverride } from '../../shared/schemas/estimate.ts'
 import { readPrice, readTable, type TableRow } from '../priceBook/textTable.ts'
 
 /** What a person keys of a line; the rest comes along with the item. */
 export interface DemoLine {
   /** `null`: the house as a whole. */
   roomKey: string | null
-  itemKey: string
+  /** `null`: no item of the price book, but work of the estimator's own. */
+  itemKey: string | null
+  /** What the price book would have brought along. */
+  ownWork?: Pick<LineFields, 'system' | 'trade' | 'description' | 'unit'>
   /** `null`: the item's own formula. */
   quantity: string | null
   basis: Basis

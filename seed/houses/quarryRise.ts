@@ -15,9 +15,9 @@ export const quarryRise: DemoHouse = {
     storeys: 1.5,
     kind: 'split-level',
     footprint: ell(`52'`, `28'`, `22'`, `4'`),
-    wallHeightIn: outside(`11' 6"`),
+    wallHeightIn: outside(`8' 2"`),
     overhangIn: outside(`24"`),
-    roof: [{ kind: 'gable', rise: 4 }],
+    roof: [{ kind: 'hip', rise: 4 }],
     note: 'Demo: all invented. Three levels, half a stair apart; the family room wing was added in 1968.',
   },
   rooms: [
@@ -59,7 +59,7 @@ export const quarryRise: DemoHouse = {
       note: 'Wing of 1968. Nine-inch floor tile below the carpet edge: left undisturbed.',
     }),
     room('laundry', 'Laundry', 'laundry', rectangle(`9'`, `6' 3"`), flat(`7' 6"`), { openings: [door(`2' 8"`, `6' 8"`, 2)] }),
-    room('garage', 'Garage', 'other', rectangle(`22'`, `12' 4"`), flat(`8'`), {
+    room('garage', 'Garage', 'storage', rectangle(`22'`, `12' 4"`), flat(`8'`), {
       openings: [door(`9'`, `7'`), door(`2' 8"`, `6' 8"`, 2), window(`3'`, `2'`)],
     }),
   ],

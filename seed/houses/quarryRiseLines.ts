@@ -7,7 +7,7 @@ const quarryOutside = lineTable(`
     One flat layer from 2006. The roof inspection says whether it may be laid over.
   house       | roof/drip-edge                 | eave_length           | hired     | measured |
   house       | roof/pipe-boot                 | 3                     | hired     | measured |
-  house       | roof-vent/ridge                | ridge_length          | hired     | measured |
+  house       | roof-vent/ridge                | 28                    | hired     | measured |
   house       | roof-vent/soffit-reopen        | 8                     | own hands | measured |
   house       | roof/gutter                    | eave_length           | hired     | measured |
   house       | siding/wood-lap-part           | 90                    | hired     | measured |
@@ -41,7 +41,7 @@ const quarryBelow = lineTable(`
   house       | pest/droppings-clean-up        | 180                   | hired     | seen     |
     Along the crawl space walls. Nobody goes in before the firm is done.
   house       | foundation/crack-inject        | 14                    | hired     | measured |
-  house       | insulation/attic-top-up        | attic_area * 0.9      | hired     | measured |
+  house       | insulation/attic-top-up        | footprint_area * 0.75 | hired     | measured |
 `)
 
 /** Pipes, wires, heat. */

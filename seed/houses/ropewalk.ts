@@ -15,7 +15,7 @@ export const ropewalk: DemoHouse = {
     storeys: 2,
     kind: 'row',
     footprint: rectangle(`34'`, `18'`),
-    wallHeightIn: outside(`17' 6"`),
+    wallHeightIn: outside(`8' 9"`),
     overhangIn: 0,
     roof: [{ kind: 'flat', rise: 0 }],
     note: 'Demo: all invented. Party walls both sides, brick front and back, flat roof behind a parapet.',

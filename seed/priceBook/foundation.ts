@@ -43,15 +43,15 @@ export const crawlSpaceItems = priceTable(
   { system: 'crawl-space', trade: 'general', priceDate: '2026-03-17' },
   `
   key                      | name                           | unit | uniformat | own hands      | hired          | labor % | waste % | package    | minimum | hours | room formula | house formula
-  crawl-space/ground-sheet | Ground sheet, taped            | sf   | A2020     | 0.2 0.28 0.4   | 0.85 1.2 1.75  | 70      | 10      | 1000 roll  | 450     | 0.014 |              | crawl_area
+  crawl-space/ground-sheet | Ground sheet, taped            | sf   | A2020     | 0.2 0.28 0.4   | 0.85 1.2 1.75  | 70      | 10      | 1000 roll  | 450     | 0.014 |              | footprint_area
     Ten-mil sheet, lapped a foot, taped, turned up the wall.
-  crawl-space/closed       | Crawl space closed and lined   | sf   | A2020     | 0.9 1.25 1.75  | 4 5.6 8        | 62      | 10      |            | 2500    | 0.07  |              | crawl_area
+  crawl-space/closed       | Crawl space closed and lined   | sf   | A2020     | 0.9 1.25 1.75  | 4 5.6 8        | 62      | 10      |            | 2500    | 0.07  |              | footprint_area
     Heavy liner on ground and walls, vents closed, insulated; radon and combustion air looked at first.
   crawl-space/vent         | Foundation vent                | each | A2020     | 16 26 40       | 85 130 200     | 72      | 0       |            | 220     | 1.2   |              | 6
     Screened vent in the old hole.
   crawl-space/access-door  | Crawl space access door        | each | A2020     | 55 90 140      | 220 330 500    | 66      | 0       |            | 220     | 3     |              | 1
     Insulated, gasketed, with a lock.
-  crawl-space/clean-out    | Debris cleared from below      | sf   | F2010     | 0.1 0.18 0.3   | 1.1 1.7 2.7    | 88      | 0       |            | 450     | 0.03  | floor_area   | crawl_area
+  crawl-space/clean-out    | Debris cleared from below      | sf   | F2010     | 0.1 0.18 0.3   | 1.1 1.7 2.7    | 88      | 0       |            | 450     | 0.03  | floor_area   | footprint_area
     Bagged and carried out; not droppings, not fibrous debris.
   crawl-space/drain-inside | Perimeter drain, inside        | lf   | A2020     |                | 52 74 105      | 66      | 0       |            | 3000    | 0     |              | outside_perimeter
     Slab edge cut, pipe and stone to a sump, slab patched.
@@ -85,13 +85,13 @@ export const pestItems = priceTable(
     Quarter-inch mesh let into the ground a foot.
   pest/trap-visits        | Rodent trapping, four visits      | lump | B1010     |              | 320 460 680   | 85      | 0       |            | 320     | 0     |              | 1
     Set, checked, carried off, with a report of how they get in.
-  pest/droppings-clean-up | Droppings cleaned up              | sf   | F2020     |              | 1.6 2.6 4.2   | 84      | 0       |            | 600     | 0     | floor_area   | attic_area * 0.3
+  pest/droppings-clean-up | Droppings cleaned up              | sf   | F2020     |              | 1.6 2.6 4.2   | 84      | 0       |            | 600     | 0     | floor_area   | footprint_area * 0.3
     By a firm that does this work: wetted, bagged, wiped down with disinfectant, masks throughout.
   pest/termite-soil       | Termite soil treatment            | lf   | B1010     |              | 5.5 8 12      | 66      | 0       |            | 750     | 0     |              | outside_perimeter
     Licensed applicator, drilled where paved, a year's guarantee.
   pest/termite-bait       | Termite bait stations, first year | lf   | B1010     |              | 4.2 6.2 9     | 60      | 0       |            | 700     | 0     |              | outside_perimeter
     Stations and visits for a year.
-  pest/borate             | Borate on bare framing            | sf   | B1010     | 0.14 0.2 0.3 | 0.7 1.05 1.6  | 78      | 5       | 200 gallon | 300     | 0.012 |              | crawl_area
+  pest/borate             | Borate on bare framing            | sf   | B1010     | 0.14 0.2 0.3 | 0.7 1.05 1.6  | 78      | 5       | 200 gallon | 300     | 0.012 |              | footprint_area
     Sprayed on clean bare wood before it is closed.
   pest/bat-exclusion      | Bats let out and kept out         | lump | B2010     |              | 750 1250 2100 | 82      | 0       |            | 750     | 0     |              | 1
     One-way doors in the lawful season, all gaps sealed. Never while there are young.

@@ -19,7 +19,7 @@ export const abatementItems = priceTable(
     Licensed firm, each joint.
   hazard/siding-abated            | Cement-board siding abated                   | sf   | F2020     |           | 6 9 13.5       | 76      | 0       |         | 4500    | 0     |              | outside_wall_area
     Licensed firm; new siding apart.
-  hazard/vermiculite-removed      | Vermiculite removed                          | sf   | F2020     |           | 9 13.5 20      | 80      | 0       |         | 4500    | 0     |              | attic_area
+  hazard/vermiculite-removed      | Vermiculite removed                          | sf   | F2020     |           | 9 13.5 20      | 80      | 0       |         | 4500    | 0     |              | footprint_area
     Licensed firm, containment, vacuumed, air tests.
   hazard/lead-encapsulated        | Lead paint encapsulated                      | sf   | F2020     |           | 4.2 6.2 9.2    | 76      | 0       |         | 900     | 0     | wall_area    | 200
     Certified firm, listed coating on sound paint, clearance test.

@@ -29,7 +29,7 @@ export const smellItems = priceTable(
   { system: 'smells', trade: 'cleaning', priceDate: '2026-02-23' },
   `
   key                | name                                | unit | uniformat | own hands      | hired          | labor % | waste % | package    | minimum | hours | room formula | house formula
-  smell/deep-clean   | Whole-house deep clean              | sf   | C3010     | 0.05 0.08 0.13 | 0.45 0.65 0.95 | 90      | 0       |            | 300     | 0.01  | floor_area   | sum_floor_area
+  smell/deep-clean   | Whole-house deep clean              | sf   | C3010     | 0.05 0.08 0.13 | 0.45 0.65 0.95 | 90      | 0       |            | 300     | 0.01  | floor_area   | living_area
     Measured by floor area: washed down top to bottom, appliances, windows inside.
   smell/seal-floor   | Subfloor sealed for pet stains      | sf   | C3020     | 0.22 0.32 0.46 | 0.95 1.4 2.1   | 72      | 5       | 150 gallon | 250     | 0.018 | floor_area   | 200
     Enzyme wash, dried, two coats of shellac primer.

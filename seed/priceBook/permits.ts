@@ -33,7 +33,7 @@ export const jobItems = priceTable(
     Clean masonry or soil.
   job/dump-run          | Dump run, pick-up load          | load  | F2010     | 45 70 110      | 170 250 370    | 62      | 0       |          | 120     | 2.5   |              | 3
     Fee and fuel.
-  job/floor-protection  | Floors protected                | sf    | C3020     | 0.12 0.18 0.28 | 0.35 0.52 0.8  | 55      | 10      | 100 roll | 150     | 0.006 | floor_area   | sum_floor_area
+  job/floor-protection  | Floors protected                | sf    | C3020     | 0.12 0.18 0.28 | 0.35 0.52 0.8  | 55      | 10      | 100 roll | 150     | 0.006 | floor_area   | living_area
     Board or paper, taped, on what stays.
   job/dust-walls        | Dust walls and covers, a room   | each  | F2010     | 22 36 58       | 110 165 250    | 72      | 0       |          | 150     | 1.5   | 1            | 4
     Sheeting with a zipper door.
@@ -43,7 +43,7 @@ export const jobItems = priceTable(
     Weekly service.
   job/storage-box       | Storage box in the drive        | month | E2020     |                | 130 180 260    | 15      | 0       |          | 180     | 0     |              | 2
     Delivered, rent, taken away.
-  job/final-clean       | Clean-up after the work         | sf    | F2010     | 0.04 0.07 0.12 | 0.28 0.42 0.64 | 90      | 0       |          | 220     | 0.008 | floor_area   | sum_floor_area
+  job/final-clean       | Clean-up after the work         | sf    | F2010     | 0.04 0.07 0.12 | 0.28 0.42 0.64 | 90      | 0       |          | 220     | 0.008 | floor_area   | living_area
     Measured by floor area: dust, windows, stickers.
   job/supervision       | Supervision, small job          | week  | F2010     |                | 750 1100 1700  | 100     | 0       |          | 750     | 0     |              | 3
     Where no one contractor runs the job.

@@ -5,7 +5,7 @@ export const supplyPipingItems = priceTable(
   { system: 'supply-piping', trade: 'plumbing', priceDate: '2026-02-05' },
   `
   key                         | name                                     | unit | uniformat | own hands   | hired          | labor % | waste % | package   | minimum | hours | room formula | house formula
-  supply-pipe/repipe-fixture  | Repipe, each fixture                     | each | D2020     | 75 110 165  | 420 560 760    | 72      | 0       |           | 900     | 5     | 3            | fixtures
+  supply-pipe/repipe-fixture  | Repipe, each fixture                     | each | D2020     | 75 110 165  | 420 560 760    | 72      | 0       |           | 900     | 5     | 3            | 8
     New plastic tube hot and cold from the main to the stop, old pipe left dead in the wall; wall patching apart.
   supply-pipe/plastic-tube    | Plastic tube, half or three-quarter      | lf   | D2020     | 0.9 1.3 1.9 | 8 11.5 17      | 80      | 10      | 100 roll  | 350     | 0.1   | 20           | 60
     With supports and fittings, in open framing.
@@ -23,7 +23,7 @@ export const supplyPipingItems = priceTable(
     With vacuum breaker.
   supply-pipe/regulator       | Pressure regulator                       | each | D2020     |             | 320 450 640    | 62      | 0       |           | 250     | 0     |              | 1
     Where street pressure is over 80 psi.
-  supply-pipe/stop-valve      | Fixture stop and connector               | each | D2020     | 11 17 26    | 75 115 170     | 80      | 0       |           | 180     | 0.6   | 2            | fixtures
+  supply-pipe/stop-valve      | Fixture stop and connector               | each | D2020     | 11 17 26    | 75 115 170     | 80      | 0       |           | 180     | 0.6   | 2            | 8
     Quarter-turn stop, braided connector.
   supply-pipe/expansion-tank  | Expansion tank                           | each | D2020     |             | 190 280 410    | 64      | 0       |           | 180     | 0     |              | 1
     Where a check valve or regulator closes the system.
@@ -41,7 +41,7 @@ export const drainPipingItems = priceTable(
   key                          | name                                 | unit | uniformat | own hands | hired           | labor % | waste % | package | minimum | hours | room formula | house formula
   drain-pipe/renew-small-house | Old drain lines renewed, small house | lump | D2030     |           | 5000 7200 10000 | 74      | 0       |         | 5000    | 0     |              | 1
     Stack and branches to kitchen, one bath and laundry in plastic, from above or from an open cellar or crawl space; closing walls apart.
-  drain-pipe/fixture-branch    | Drain and vent branch, each fixture  | each | D2030     | 55 85 130 | 480 680 980     | 78      | 0       |         | 600     | 7     | 1            | fixtures
+  drain-pipe/fixture-branch    | Drain and vent branch, each fixture  | each | D2030     | 55 85 130 | 480 680 980     | 78      | 0       |         | 600     | 7     | 1            | 8
     Plastic from fixture to stack, vented.
   drain-pipe/stack             | Soil stack replaced                  | lf   | D2030     |           | 110 160 235     | 72      | 0       |         | 1400    | 0     | 10           | 20
     Old iron cut out in lengths, carried, plastic or new iron hung.
