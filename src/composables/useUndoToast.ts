@@ -1,4 +1,5 @@
 import { readonly, ref } from 'vue'
+import { ProblemError } from '../api/ProblemError.ts'
 import { useErrorMessage } from './useErrorMessage.ts'
 
 export interface Toast {
@@ -25,6 +26,8 @@ export function useUndoToast() {
   }
 
   function sayProblem(error: unknown): void {
+    // The sign-in page, to which that leads, says it.
+    if (error instanceof ProblemError && error.status === 401) return
     show({ text: errorMessage(error), undo: null, isProblem: true })
   }
 
