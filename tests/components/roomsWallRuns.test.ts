@@ -165,6 +165,16 @@ describe('wallCrossings', () => {
     expect(wallCrossings(bowTie)).toEqual([{ walls: [1, 3], at: [50, 50] }])
   })
 
+  it('finds a wall that runs back along another', () => {
+    const corners: Corner[] = [
+      [0, 0],
+      [100, 0],
+      [40, 0],
+      [40, 80],
+    ]
+    expect(wallCrossings(corners)[0]).toEqual({ walls: [1, 2], at: [100, 0] })
+  })
+
   it('finds none in an L', () => {
     expect(wallCrossings(ell)).toEqual([])
   })

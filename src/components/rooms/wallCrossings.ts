@@ -1,41 +1,35 @@
+import { wallsThatMeet } from '../../../shared/engine/geometry/wallsThatMeet.ts'
 import type { Corner } from '../../../shared/schemas/room.ts'
 
-/** Two walls that meet away from a corner that they share; walls count from 1, as they are keyed. */
+/** Two walls that meet where they have no corner in common; walls count from 1, as they are keyed. */
 export interface WallCrossing {
   walls: readonly [number, number]
   at: Corner
 }
 
-/** Where the walls of a closed polygon cross, to mark the spot on the plan. Whether the shape may stand is the engine's to say. */
-export function wallCrossings(corners: readonly Corner[]): WallCrossing[] {
-  const count = corners.length
-  const crossings: WallCrossing[] = []
-  for (let first = 0; first < count; first += 1) {
-    for (let second = first + 2; second < count; second += 1) {
-      const areNeighbours = first === 0 && second === count - 1
-      if (areNeighbours) continue
-      const at = meetingPoint(wallAt(corners, first), wallAt(corners, second))
-      if (at) crossings.push({ walls: [first + 1, second + 1], at })
-    }
-  }
-  return crossings
-}
-
 type Wall = readonly [Corner, Corner]
+
+/** Where the walls of a closed polygon meet and shouldn't, to mark the spot on the plan. Which walls they are is the engine's to say. */
+export function wallCrossings(corners: readonly Corner[]): WallCrossing[] {
+  return wallsThatMeet(corners).map(([one, other]) => ({
+    walls: [one + 1, other + 1],
+    at: meetingPoint(wallAt(corners, one), wallAt(corners, other)),
+  }))
+}
 
 function wallAt(corners: readonly Corner[], index: number): Wall {
   return [corners[index] as Corner, corners[(index + 1) % corners.length] as Corner]
 }
 
-function meetingPoint([a, b]: Wall, [c, d]: Wall): Corner | null {
-  const abx = b[0] - a[0]
-  const aby = b[1] - a[1]
-  const cdx = d[0] - c[0]
-  const cdy = d[1] - c[1]
-  const cross = abx * cdy - aby * cdx
-  if (cross === 0) return null
-  const along = ((c[0] - a[0]) * cdy - (c[1] - a[1]) * cdx) / cross
-  const across = ((c[0] - a[0]) * aby - (c[1] - a[1]) * abx) / cross
-  const meets = along >= 0 && along <= 1 && across >= 0 && across <= 1
-  return meets ? [a[0] + along * abx, a[1] + along * aby] : null
+/** Of walls that lie on one another, an end of one that lies on the other. */
+function meetingPoint([a, b]: Wall, [c, d]: Wall): Corner {
+  const [abX, abY, cdX, cdY] = [b[0] - a[0], b[1] - a[1], d[0] - c[0], d[1] - c[1]]
+  const cross = abX * cdY - abY * cdX
+  if (cross === 0) return [a, b].find((end) => liesOn(end, c, d)) ?? c
+  const along = ((c[0] - a[0]) * cdY - (c[1] - a[1]) * cdX) / cross
+  return [a[0] + along * abX, a[1] + along * abY]
+}
+
+function liesOn([x, y]: Corner, c: Corner, d: Corner): boolean {
+  return x >= Math.min(c[0], d[0]) && x <= Math.max(c[0], d[0]) && y >= Math.min(c[1], d[1]) && y <= Math.max(c[1], d[1])
 }

@@ -1,0 +1,6 @@
+import { formatLength } from '../../../shared/engine/index.ts'
+
+/** A length as drawings give it: to the nearest sixteenth of an inch, because a wall at an angle has no end to its fraction. */
+export function drawnLength(inches: number): string {
+  return formatLength(Math.round(inches * 16) / 16)
+}
