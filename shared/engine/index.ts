@@ -1,4 +1,5 @@
 /** The contents page of the engine: what the client, the server and the commands compute with. */
+export { ENGINE_VERSION } from './engineVersion.ts'
 export type { Dimension } from '../catalogue/units.ts'
 export type { EstimateInput, HouseInput, LineInput, RoomInput } from './estimateInput.ts'
 
@@ -15,8 +16,15 @@ export { houseMeasures } from './takeoff/houseMeasures.ts'
 export { MEASURES } from './takeoff/measureList.ts'
 export { roomMeasures } from './takeoff/roomMeasures.ts'
 
+export { checkFormula, type CheckedFormula } from './formula/checkFormula.ts'
+
 export { effectivePrice } from './pricing/effectivePrice.ts'
 export { regionalPrice, type RegionalPrice } from './pricing/regionalPrice.ts'
 
+export { computeEstimate } from './estimate/computeEstimate.ts'
 export { defaultSettings } from './estimate/defaultSettings.ts'
+export type { Subtotal } from './estimate/groupSums.ts'
+export type { LineFigures } from './estimate/lineFigures.ts'
+export type { LiveEstimate } from './estimate/liveEstimate.ts'
+export { openEstimate } from './estimate/openEstimate.ts'
 export { toEstimateInput } from './estimate/toEstimateInput.ts'

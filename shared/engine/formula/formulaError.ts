@@ -1,0 +1,28 @@
+/** From and to, in characters of the formula's text; `to` is the first that is not part of it. */
+export type Span = readonly [from: number, to: number]
+
+export type FormulaCode =
+  | 'bad-syntax'
+  | 'divides-by-zero'
+  | 'negative'
+  | 'no-measure'
+  | 'not-allowed'
+  | 'not-finite'
+  | 'too-deep'
+  | 'too-large'
+  | 'too-long'
+  | 'unit-mismatch'
+  | 'unknown-name'
+  | 'unknown-unit'
+
+/** What is wrong with a formula, and where. Caught where the formula is read or computed; it never leaves the engine. */
+export class FormulaError extends Error {
+  constructor(
+    readonly code: FormulaCode,
+    message: string,
+    readonly at: Span,
+  ) {
+    super(message)
+    this.name = 'FormulaError'
+  }
+}
