@@ -25,17 +25,25 @@ interface InAppOptions {
   props?: Record<string, unknown>
   /** The address that the app stands at. */
   at?: string
+  /** Names of components that are no part of the test and stay empty. */
+  leaveOut?: readonly string[]
 }
 
 /** Mounts a component in the app's own surroundings: its routes, its session and a fresh cache of what the server said. */
-export async function mountInApp(component: Component, { role, props = {}, at = '/sign-in' }: InAppOptions = {}): Promise<MountedInApp> {
+export async function mountInApp(
+  component: Component,
+  { role, props = {}, at = '/sign-in', leaveOut = [] }: InAppOptions = {},
+): Promise<MountedInApp> {
   const pinia = freshPinia(role)
   const router = createRouter({ history: createMemoryHistory(), routes })
   guardRoutes(router, createApp({}))
   await router.push(at)
   const wrapper = mount(component, {
     props,
-    global: { plugins: [pinia, router, [VueQueryPlugin, { queryClient }]] },
+    global: {
+      plugins: [pinia, router, [VueQueryPlugin, { queryClient }]],
+      stubs: Object.fromEntries(leaveOut.map((name) => [name, true])),
+    },
     attachTo: document.body,
   })
   await flushPromises()
