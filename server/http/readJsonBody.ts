@@ -18,12 +18,12 @@ function parserFor(limit: number): RequestHandler {
  * Read after the guards, so that nobody's 50 MB are taken in before it is known who sends them.
  */
 export async function readJsonBody(req: Request, res: Response, limit = BODY_LIMIT_BYTES): Promise<unknown> {
+  const hasNoBody = req.headers['transfer-encoding'] === undefined && Number(req.headers['content-length'] ?? 0) === 0
+  if (hasNoBody) throw new AppError({ status: 400, code: 'body-missing', detail: 'This call needs a JSON body.' })
   const isOfOtherType = req.is('application/json') === false
   if (isOfOtherType) {
     throw new AppError({ status: 415, code: 'content-type', detail: 'Send the body as application/json.' })
   }
-  const hasNoBody = req.headers['transfer-encoding'] === undefined && Number(req.headers['content-length'] ?? 0) === 0
-  if (hasNoBody) throw new AppError({ status: 400, code: 'body-missing', detail: 'This call needs a JSON body.' })
   await new Promise<void>((resolve, reject) => {
     parserFor(limit)(req, res, (error: unknown) => (error ? reject(asRefusal(error, limit)) : resolve()))
   })

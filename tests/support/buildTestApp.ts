@@ -1,6 +1,6 @@
 import { pino } from 'pino'
 import request from 'supertest'
-import { buildApp } from '../../server/app.ts'
+import { buildApp, type AppParts } from '../../server/app.ts'
 import type { AppConfig } from '../../server/config/appConfig.ts'
 import { migrate } from '../../server/db/migrate.ts'
 import { openDatabase } from '../../server/db/openDatabase.ts'
@@ -33,7 +33,7 @@ export type SignedIn = { user: TestUser; agent: ReturnType<typeof request.agent>
  * The whole app over a fresh database in memory, in the test's own process: migrated, a clock that the test sets,
  * mail kept in a list, every answer checked against its description.
  */
-export function buildTestApp(overrides: Partial<AppConfig> = {}) {
+export function buildTestApp(overrides: Partial<AppConfig> = {}, otherParts: Partial<AppParts> = {}) {
   const db = openDatabase(':memory:')
   migrate(db)
   const { clock, advance } = steppingClock()
@@ -44,12 +44,17 @@ export function buildTestApp(overrides: Partial<AppConfig> = {}) {
     },
   }
   const config = { ...TEST_CONFIG, ...overrides }
-  const { app, operations, events } = buildApp({ db, clock, mail, hasher, config, logger: pino({ level: 'silent' }) })
+  const { app, operations, events } = buildApp({ db, clock, mail, hasher, config, logger: pino({ level: 'silent' }), ...otherParts })
   const sessions = createSessionService({ db, clock, onEnd: (end) => events.endSession(end) })
+
+  /** The cookie of a new session of this person. */
+  function cookieOf(user: Pick<TestUser, 'id'>): string {
+    return `quoinbook_session=${sessions.begin(db, user.id)}`
+  }
 
   /** An agent that holds a session of this person. */
   function agentOf(user: TestUser): SignedIn['agent'] {
-    return request.agent(app).set('Cookie', `quoinbook_session=${sessions.begin(db, user.id)}`) as SignedIn['agent']
+    return request.agent(app).set('Cookie', cookieOf(user)) as SignedIn['agent']
   }
 
   return {
@@ -64,6 +69,7 @@ export function buildTestApp(overrides: Partial<AppConfig> = {}) {
     /** Mail in the order it was sent. */
     sentMail,
     agentOf,
+    cookieOf,
     /** A new person of the role, signed in. */
     signInAs(role: Role, fields: Partial<TestUser> = {}): SignedIn {
       const user = buildUser(db, { ...fields, role })

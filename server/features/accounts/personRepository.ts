@@ -15,13 +15,16 @@ const personColumns = {
   lastSignInAt: users.lastSignInAt,
 }
 
+/** As a person sorts names: capitals make no difference. */
+const byName = sql`${users.name} collate nocase`
+
 export interface PersonWithHash {
   person: Person
   passwordHash: string | null
 }
 
 export function listPeople(db: Queryable): Person[] {
-  return db.select(personColumns).from(users).orderBy(asc(users.name), asc(users.email)).all()
+  return db.select(personColumns).from(users).orderBy(byName, asc(users.email)).all()
 }
 
 /** Active owners, for choosing with whom a house is shared. */
@@ -30,7 +33,7 @@ export function listActiveOwners(db: Queryable): { id: string; name: string; ema
     .select({ id: users.id, name: users.name, email: users.email })
     .from(users)
     .where(and(eq(users.role, 'owner'), eq(users.status, 'active')))
-    .orderBy(asc(users.name))
+    .orderBy(byName)
     .all()
 }
 
