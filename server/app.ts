@@ -11,11 +11,20 @@ import { personOperations } from './features/accounts/personRoutes.ts'
 import { sessionOperations } from './features/accounts/sessionRoutes.ts'
 import { createSessionService } from './features/accounts/sessionService.ts'
 import { createEventHub, type EventHub } from './features/events/eventHub.ts'
+import { createDomainServices } from './features/domainServices.ts'
+import { estimateOperations } from './features/estimates/estimateRoutes.ts'
+import { lineOperations } from './features/estimates/lineRoutes.ts'
 import { eventOperations } from './features/events/eventRoutes.ts'
 import { firmOperations } from './features/firm/firmRoutes.ts'
 import { healthOperations } from './features/health/healthRoutes.ts'
 import { openApiOperations } from './features/health/openApiRoutes.ts'
+import { mayHearOfChange } from './features/houses/houseAccess.ts'
+import { houseOperations } from './features/houses/houseRoutes.ts'
 import { outboxOperations } from './features/outbox/outboxRoutes.ts'
+import { priceBookOperations } from './features/price-book/priceBookRoutes.ts'
+import { roomOperations } from './features/rooms/roomRoutes.ts'
+import { shareOperations } from './features/sharing/shareRoutes.ts'
+import { summaryOperations } from './features/summary/summaryRoutes.ts'
 import { apiRouter } from './http/apiRouter.ts'
 import type { Operation } from './http/operation.ts'
 import type { MailSender } from './mail/mailSender.ts'
@@ -54,7 +63,8 @@ export function buildApp(parts: AppParts): BuiltApp {
   const sessions = createSessionService({ db, clock, onEnd: (end) => events.endSession(end) })
   const accounts = createAccountServices({ ...parts, events, sessions })
   const accountLimit = limitByAddress({ limit: config.limits.accountsPerQuarterHour, windowMs: 15 * MINUTE_MS })
-  const services = { ...parts, events, sessions, accounts, accountLimit }
+  events.filterBy(mayHearOfChange(db))
+  const services = { ...parts, ...createDomainServices({ db, clock, events }), events, sessions, accounts, accountLimit }
 
   const described = [
     ...healthOperations(services),
@@ -63,6 +73,13 @@ export function buildApp(parts: AppParts): BuiltApp {
     ...passwordOperations(services),
     ...personOperations(services),
     ...outboxOperations(services),
+    ...priceBookOperations(services),
+    ...houseOperations(services),
+    ...roomOperations(services),
+    ...shareOperations(services),
+    ...estimateOperations(services),
+    ...lineOperations(services),
+    ...summaryOperations(services),
     ...eventOperations(services),
   ]
   const operations = [...described, ...openApiOperations(described, packageInfo.version)]

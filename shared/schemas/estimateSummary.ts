@@ -25,6 +25,16 @@ export const evidenceShareSchema = z.object({
 
 export const summaryCautionSchema = z.object({ key: z.string(), title: z.string(), text: z.string(), source: z.string() })
 
+/** What nobody could see yet. It is in no total. */
+export const summaryUnknownSchema = z.object({
+  description: z.string(),
+  /** Title of the house system. */
+  systemTitle: z.string(),
+  /** In 100, `null` where nobody has judged it. */
+  chancePercent: z.number().nullable(),
+  costCents: amountRangeSchema.nullable(),
+})
+
 /** What an owner reads of an estimate, in one answer. */
 export const estimateSummarySchema = z.object({
   estimateId: idSchema,
@@ -54,6 +64,7 @@ export const estimateSummarySchema = z.object({
   lineCount: z.int(),
   /** Lines that hold an error and are left out of every figure here. */
   errorCount: z.int(),
+  unknowns: z.array(summaryUnknownSchema),
   cautions: z.array(summaryCautionSchema),
   /** Says that this is a working estimate and not an issued one. */
   notIssuedNotice: z.string(),
@@ -64,5 +75,6 @@ export const estimateSummarySchema = z.object({
 })
 
 export type SummaryPart = z.infer<typeof summaryPartSchema>
+export type SummaryUnknown = z.infer<typeof summaryUnknownSchema>
 export type EvidenceShare = z.infer<typeof evidenceShareSchema>
 export type EstimateSummary = z.infer<typeof estimateSummarySchema>

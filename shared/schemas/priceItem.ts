@@ -64,6 +64,8 @@ export const priceItemPatchSchema = z.strictObject(priceItemFieldsSchema.shape).
 export const priceItemSchema = priceItemFieldsSchema.safeExtend({
   /** Version of this row, for If-Match while a draft is edited. */
   rowVersion: versionSchema,
+  /** Read for a region: the prices are that region's own row, not the base row by its factors. */
+  isRegionsOwn: z.boolean().optional(),
 })
 
 export const regionSchema = z.strictObject({
