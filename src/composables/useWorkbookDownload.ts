@@ -1,0 +1,50 @@
+import { onScopeDispose, ref } from 'vue'
+import { downloadWorkbook } from '../api/estimates.ts'
+import { useErrorMessage } from './useErrorMessage.ts'
+
+const SHOWN_AFTER_MS = 500
+
+/** Fetches the workbook of an estimate and hands it to the browser to keep. What takes longer than half a second shows, and can be given up. */
+export function useWorkbookDownload() {
+  const errorMessage = useErrorMessage()
+  const isUnderWay = ref(false)
+  /** Under way for long enough to be told. */
+  const isSlow = ref(false)
+  /** Why there is no workbook, in words; empty when all is well. */
+  const problem = ref('')
+  let giveUp: AbortController | null = null
+
+  async function download(estimateId: string): Promise<void> {
+    if (isUnderWay.value) return
+    isUnderWay.value = true
+    problem.value = ''
+    giveUp = new AbortController()
+    const timer = setTimeout(() => (isSlow.value = true), SHOWN_AFTER_MS)
+    try {
+      const { content, fileName } = await downloadWorkbook(estimateId, giveUp.signal)
+      keepFile(content, fileName)
+    } catch (error) {
+      if (!giveUp.signal.aborted) problem.value = errorMessage(error)
+    } finally {
+      clearTimeout(timer)
+      isUnderWay.value = false
+      isSlow.value = false
+    }
+  }
+
+  function cancel(): void {
+    giveUp?.abort()
+  }
+
+  onScopeDispose(cancel)
+  return { download, cancel, isUnderWay, isSlow, problem }
+}
+
+function keepFile(content: Blob, fileName: string): void {
+  const address = URL.createObjectURL(content)
+  const link = document.createElement('a')
+  link.href = address
+  link.download = fileName
+  link.click()
+  URL.revokeObjectURL(address)
+}
