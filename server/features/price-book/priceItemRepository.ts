@@ -31,7 +31,7 @@ export function findItems(db: Queryable, book: BookVersion, filter: ItemFilter):
     ? items
         .innerJoin(sql`price_items_search`, sql`price_items_search.rowid = ${priceItems.id}`)
         .where(and(isInVersion(book, filter), sql`price_items_search match ${matchOf(words)}`))
-        .orderBy(sql`bm25(price_items_search, 8.0, 1.0)`, asc(priceItems.name))
+        .orderBy(sql`price_items_search.rank`)
     : items.where(isInVersion(book, filter)).orderBy(asc(priceItems.name), asc(priceItems.key))
   const found = limit === undefined ? query.all() : query.limit(limit).all()
   return found.map(({ row }) => itemOfRow(row))
