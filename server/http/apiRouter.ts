@@ -45,7 +45,7 @@ async function perform(operation: Operation, req: Request, res: Response, { idem
   const ifMatch = operation.ifMatch ? readIfMatch(req) : null
   const body = operation.body ? await readJsonBody(req, res, operation.bodyLimit) : undefined
   const run = () => operation.run({ user, params: joinWildcards(req.params), query: req.query, body, ifMatch, req, res })
-  const mayBeRepeated = operation.method === 'post' && user !== null
+  const mayBeRepeated = operation.method === 'post' && operation.action !== 'public' && user !== null
   const usualStatus = operation.status ?? 200
   const { status, answer } = mayBeRepeated
     ? await idempotency({ req, res, userId: user.id, body, status: usualStatus, run })

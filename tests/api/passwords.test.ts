@@ -225,7 +225,10 @@ describe('POST /api/password-resets/redeem', () => {
       .setIssuer('quoinbook')
       .setAudience('password-reset')
       .setSubject(user.id)
-    const forged = await claims.setJti('1').setExpirationTime(new Date('2099-01-01')).sign(new TextEncoder().encode(app.config.sessionSecret))
+    const forged = await claims
+      .setJti('1')
+      .setExpirationTime(new Date('2099-01-01'))
+      .sign(new TextEncoder().encode(app.config.sessionSecret))
     const unsigned = `${Buffer.from('{"alg":"none"}').toString('base64url')}.${forged.split('.')[1]}.`
     for (const token of [invitation, forged, unsigned, 'nonsense']) await expectLinkEnded(token)
   })

@@ -13,7 +13,7 @@ import { linkEnded, type LinkTokens } from './linkTokens.ts'
 import type { PasswordHasher } from './passwordHasher.ts'
 import { refuseGuessable } from './passwordRules.ts'
 import { findPerson, findPersonByEmail, findPersonWithHash, insertPerson, noteSignIn, updatePerson } from './personRepository.ts'
-import type { SessionService } from './sessionService.ts'
+import type { ActiveSession, SessionService } from './sessionService.ts'
 
 interface InvitationParts {
   db: Database
@@ -41,10 +41,11 @@ export function createInvitationService({ db, clock, config, mail, events, sessi
       return person
     },
 
-    /** Follows an invitation: sets name and password, and gives the id of a new session. */
+    /** Follows an invitation: sets name and password, and gives the id of a new session. One that the browser still held ends. */
     async accept(
       token: string,
       { name, newPassword }: { name: string; newPassword: string },
+      earlierSession: ActiveSession | null,
     ): Promise<{ user: CurrentUser; sessionToken: string }> {
       const link = await links.read('invitation', token)
       const invited = findPerson(db, link.userId)
@@ -62,6 +63,7 @@ export function createInvitationService({ db, clock, config, mail, events, sessi
         recordAudit(tx, { actorId: link.userId, what: 'person', id: link.userId, action: 'accept', before: before.person, after, at })
         return { person: after, sessionToken: sessions.begin(tx, link.userId) }
       })
+      if (earlierSession) sessions.end(earlierSession)
       const { id, email, role, version } = accepted.person
       events.publish({ type: 'people', id, version })
       return { user: { id, email, name, role }, sessionToken: accepted.sessionToken }

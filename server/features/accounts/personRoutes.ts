@@ -84,8 +84,8 @@ export function personOperations({ accounts, accountLimit }: { accounts: Account
         body: invitationAcceptSchema,
         response: currentUserSchema,
       },
-      async ({ body, res }) => {
-        const { user, sessionToken } = await invitations.accept(body.token, body)
+      async ({ body, req, res }) => {
+        const { user, sessionToken } = await invitations.accept(body.token, body, req.activeSession)
         setSessionCookie(res, sessionToken, SESSION_MAX_MS)
         return user
       },

@@ -1,6 +1,7 @@
-import { and, eq, lt, ne, or } from 'drizzle-orm'
+import { and, eq, lt, ne, or, sql } from 'drizzle-orm'
 import type { CurrentUser } from '../../../shared/schemas/account.ts'
-import type { Queryable } from '../../db/client.ts'
+import type { Database, Queryable } from '../../db/client.ts'
+import { prepared } from '../../db/prepared.ts'
 import { sessions } from '../../db/schema/sessions.ts'
 import { users } from '../../db/schema/users.ts'
 
@@ -15,9 +16,9 @@ export function insertSession(db: Queryable, session: { idHash: string; userId: 
   db.insert(sessions).values({ idHash: session.idHash, userId: session.userId, createdAt: session.at, lastSeenAt: session.at }).run()
 }
 
-/** The session and its person; `null` when there is none or the person is not active. */
-export function findSession(db: Queryable, idHash: string): SessionRecord | null {
-  const row = db
+/** Asked at every request, so it is prepared once. */
+const sessionByHash = prepared((db) =>
+  db
     .select({
       idHash: sessions.idHash,
       createdAt: sessions.createdAt,
@@ -26,9 +27,13 @@ export function findSession(db: Queryable, idHash: string): SessionRecord | null
     })
     .from(sessions)
     .innerJoin(users, eq(users.id, sessions.userId))
-    .where(and(eq(sessions.idHash, idHash), eq(users.status, 'active')))
-    .get()
-  return row ?? null
+    .where(and(eq(sessions.idHash, sql.placeholder('idHash')), eq(users.status, 'active')))
+    .prepare(),
+)
+
+/** The session and its person; `null` when there is none or the person is not active. */
+export function findSession(db: Database, idHash: string): SessionRecord | null {
+  return sessionByHash(db).get({ idHash }) ?? null
 }
 
 export function touchSession(db: Queryable, idHash: string, at: string): void {

@@ -42,6 +42,10 @@ function openStream(req: Request, res: Response, { events, sessions }: EventServ
   if (hasTooMany) throw tooMany('Too many screens are open for live changes. Close some tabs.', 60)
 
   res.writeHead(200, { 'Content-Type': 'text/event-stream', 'Cache-Control': 'no-store', 'X-Accel-Buffering': 'no' })
+  if (req.method === 'HEAD') {
+    res.end()
+    return
+  }
   res.write(': open\n\n')
   const leave = events.join({
     sessionIdHash: session.idHash,
