@@ -1,0 +1,111 @@
+import type { CellClassParams, ColDef, EditableCallbackParams, ValueGetterParams } from 'ag-grid-community'
+import { EVIDENCE_MARKS } from '../../../shared/schemas/estimate.ts'
+import { NAME_MAX, NOTE_MAX } from '../../../shared/schemas/common.ts'
+import { WHOLE_HOUSE, type GridRow } from '../../composables/estimateRows.ts'
+import { FIELD_OF_COLUMN, type CellColumn } from '../../composables/lineCells.ts'
+import type { LineField } from '../../composables/lineRow.ts'
+import { AmountCell } from './cells/AmountCell.ts'
+import { DescriptionCell } from './cells/DescriptionCell.ts'
+import { HoursCell } from './cells/HoursCell.ts'
+import { MarkCell } from './cells/MarkCell.ts'
+import { PriceCell } from './cells/PriceCell.ts'
+import { QuantityCell } from './cells/QuantityCell.ts'
+import { RangeCell } from './cells/RangeCell.ts'
+import { BasisCell, NoteCell, RoomCell } from './cells/TextCell.ts'
+import ChoiceCellEditor, { type Choice } from './editors/ChoiceCellEditor.vue'
+import FormulaCellEditor from './editors/FormulaCellEditor.vue'
+import TextCellEditor from './editors/TextCellEditor.vue'
+import { COLUMN_TITLES } from './columnTitles.ts'
+import type { GridContext } from './gridContext.ts'
+import { columnOfError } from './lineProblem.ts'
+
+type Column = ColDef<GridRow> & { colId: CellColumn }
+
+const MARK_CHOICES: readonly Choice[] = EVIDENCE_MARKS.map((mark) => ({ value: mark, title: mark, mark }))
+
+interface ColumnOptions {
+  isReadOnly: boolean
+  isSelected(key: string, column: string): boolean
+  isFound(key: string): boolean
+}
+
+/** The columns of the estimate grid, left to right; the first two stay in view. */
+export function estimateColumns({ isReadOnly, isSelected, isFound }: ColumnOptions): Column[] {
+  const isEditable = ({ data }: EditableCallbackParams<GridRow>) => !isReadOnly && data?.kind === 'line'
+  const classRules = {
+    'is-selected': ({ data, column }: CellClassParams<GridRow>) => data !== undefined && isSelected(data.key, column.getColId()),
+    'is-found': ({ data }: CellClassParams<GridRow>) => data !== undefined && isFound(data.key),
+    'is-wrong': ({ data, column }: CellClassParams<GridRow>) => hasProblem(data, column.getColId() as CellColumn),
+    'is-at-odds': ({ data, column }: CellClassParams<GridRow>) => isAtOdds(data, column.getColId() as CellColumn),
+  }
+  const column = (colId: CellColumn, width: number, more: Partial<ColDef<GridRow>>): Column => ({
+    headerName: COLUMN_TITLES[colId],
+    width,
+    cellClassRules: classRules,
+    valueGetter: valueOf,
+    ...more,
+    colId,
+  })
+
+  return [
+    column('evidence', 62, {
+      pinned: 'left',
+      lockPosition: 'left',
+      headerTooltip: 'How it is known',
+      cellRenderer: MarkCell,
+      editable: isEditable,
+      cellEditor: ChoiceCellEditor,
+      cellEditorParams: { choices: () => MARK_CHOICES, label: 'How it is known' },
+    }),
+    column('description', 226, {
+      pinned: 'left',
+      lockPosition: 'left',
+      cellRenderer: DescriptionCell,
+      editable: isEditable,
+      cellEditor: TextCellEditor,
+      cellEditorParams: { label: 'Description', maxLength: NAME_MAX },
+    }),
+    column('room', 112, {
+      cellRenderer: RoomCell,
+      editable: isEditable,
+      cellEditor: ChoiceCellEditor,
+      cellEditorParams: ({ context }: { context: GridContext }) => ({ choices: () => roomChoices(context), label: 'Room' }),
+    }),
+    column('quantity', 232, { cellRenderer: QuantityCell, editable: isEditable, cellEditor: FormulaCellEditor }),
+    column('basis', 84, { cellRenderer: BasisCell }),
+    column('price', 124, { cellRenderer: PriceCell, type: 'figure' }),
+    column('amount', 104, { cellRenderer: AmountCell, type: 'figure' }),
+    column('range', 104, { cellRenderer: RangeCell }),
+    column('hours', 60, { cellRenderer: HoursCell, type: 'figure' }),
+    column('note', 180, {
+      flex: 1,
+      minWidth: 84,
+      cellRenderer: NoteCell,
+      editable: isEditable,
+      cellEditor: TextCellEditor,
+      cellEditorParams: { label: 'Note', maxLength: NOTE_MAX, isLong: true },
+    }),
+  ]
+}
+
+/** What an editor begins with, and what tells the grid that a cell differs. */
+function valueOf({ data, column }: ValueGetterParams<GridRow>): unknown {
+  if (data?.kind !== 'line') return null
+  const field = FIELD_OF_COLUMN[column.getColId() as CellColumn]
+  return field === null ? null : (data.wrong[field]?.text ?? data.fields[field])
+}
+
+function roomChoices({ rooms }: GridContext): Choice[] {
+  return [{ value: null, title: WHOLE_HOUSE }, ...rooms().map(({ id, name }) => ({ value: id, title: name }))]
+}
+
+function hasProblem(row: GridRow | undefined, column: CellColumn): boolean {
+  if (row?.kind !== 'line') return false
+  const field = FIELD_OF_COLUMN[column]
+  return (field !== null && row.wrong[field] !== undefined) || (row.figures.error !== null && columnOfError(row) === column)
+}
+
+function isAtOdds(row: GridRow | undefined, column: CellColumn): boolean {
+  const field: LineField | null = FIELD_OF_COLUMN[column]
+  return row?.kind === 'line' && field !== null && row.conflicts.some(({ path }) => path === field)
+}
