@@ -2,7 +2,7 @@ import { z } from 'zod'
 import { fieldProblems, issueWords } from '../../shared/schemas/fieldProblems.ts'
 import { StartRefusal } from './StartRefusal.ts'
 
-export const DEFAULT_PORT = 4400
+const DEFAULT_PORT = 4400
 const SECRET_MIN_CHARS = 32
 const LOG_LEVELS = ['trace', 'debug', 'info', 'warn', 'error', 'fatal', 'silent'] as const
 

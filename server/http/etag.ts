@@ -2,7 +2,7 @@ import type { Request, Response } from 'express'
 import { AppError } from '../errors/AppError.ts'
 
 /** The version as an entity tag: `"3"`. */
-export function etagOf(version: number): string {
+function etagOf(version: number): string {
   return `"${version}"`
 }
 

@@ -5,7 +5,7 @@ import type { CurrentUser } from '../../shared/schemas/account.ts'
 import type { Answer } from './answers.ts'
 import { parseInput } from './parseInput.ts'
 
-export type Method = 'get' | 'post' | 'put' | 'patch' | 'delete'
+type Method = 'get' | 'post' | 'put' | 'patch' | 'delete'
 /** Who may call: an action of the permission table, or anybody. */
 export type Access = Action | 'public'
 
@@ -54,7 +54,7 @@ export interface OperationContext<A extends Access, M extends boolean, P, Q, B> 
 }
 
 /** What the router hands over, unchecked. */
-export interface OperationInput {
+interface OperationInput {
   user: CurrentUser | null
   params: unknown
   query: unknown

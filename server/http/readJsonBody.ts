@@ -2,7 +2,7 @@ import express, { type Request, type RequestHandler, type Response } from 'expre
 import { AppError } from '../errors/AppError.ts'
 
 /** Largest body that a call takes unless it says otherwise, in bytes. */
-export const BODY_LIMIT_BYTES = 1_000_000
+const BODY_LIMIT_BYTES = 1_000_000
 
 const parsers = new Map<number, RequestHandler>()
 

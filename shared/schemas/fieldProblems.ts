@@ -67,7 +67,7 @@ function listed(values: unknown): string {
 }
 
 /** `['openings', 0, 'widthIn']` → `openings[0].widthIn`, as a body is addressed. */
-export function fieldPath(path: readonly PropertyKey[]): string {
+function fieldPath(path: readonly PropertyKey[]): string {
   return path.reduce<string>((text, part) => {
     if (typeof part === 'number') return `${text}[${part}]`
     return text === '' ? String(part) : `${text}.${String(part)}`
@@ -80,6 +80,12 @@ export function fieldProblems(error: z.ZodError): FieldProblem[] {
     if (issue.code === 'unrecognized_keys') {
       return issue.keys.map((key) => ({ path: fieldPath([...issue.path, key]), code: 'unknown-field', message: issue.message }))
     }
-    return [{ path: fieldPath(issue.path), code: issue.code.replaceAll('_', '-'), message: issue.message }]
+    return [{ path: fieldPath(issue.path), code: ownCode(issue) ?? issue.code.replaceAll('_', '-'), message: issue.message }]
   })
+}
+
+/** The code that a check of our own gave with its issue: `params: { code: 'bad-length' }`. */
+function ownCode(issue: z.core.$ZodIssue): string | null {
+  const code: unknown = issue.code === 'custom' ? issue.params?.code : null
+  return typeof code === 'string' ? code : null
 }

@@ -26,8 +26,6 @@ interface InvitationParts {
   links: LinkTokens
 }
 
-export type InvitationService = ReturnType<typeof createInvitationService>
-
 /** Invitations by mail: sent by an admin, followed once by the person, who sets a password and is signed in by it. */
 export function createInvitationService({ db, clock, config, mail, events, sessions, hasher, links }: InvitationParts) {
   return {

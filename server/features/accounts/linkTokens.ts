@@ -11,7 +11,7 @@ const ALGORITHM = 'HS256'
 const HOUR_MS = 3_600_000
 
 /** What a link may be for, and how long it works. */
-export const LINK_LIFE_MS = { 'password-reset': HOUR_MS, invitation: 7 * 24 * HOUR_MS } as const
+const LINK_LIFE_MS = { 'password-reset': HOUR_MS, invitation: 7 * 24 * HOUR_MS } as const
 export type LinkKind = keyof typeof LINK_LIFE_MS
 
 export interface LinkToken {

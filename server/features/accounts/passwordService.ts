@@ -28,8 +28,6 @@ interface PasswordParts {
 /** One person gets no more than one reset mail in this time, however often somebody asks. */
 const RESET_MAIL_PAUSE_MS = 60_000
 
-export type PasswordService = ReturnType<typeof createPasswordService>
-
 /** Passwords after the first: changed by who knows the old one, or reset by who reads the mail. */
 export function createPasswordService({ db, clock, config, mail, logger, sessions, hasher, links, guard }: PasswordParts) {
   const lastMailAt = new Map<string, number>()

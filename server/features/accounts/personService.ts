@@ -21,8 +21,6 @@ interface PersonParts {
   sessions: SessionService
 }
 
-export type PersonService = ReturnType<typeof createPersonService>
-
 /** The people of the firm: read, renamed, given another role, deactivated and taken back. */
 export function createPersonService({ db, clock, events, sessions }: PersonParts) {
   return {

@@ -6,7 +6,7 @@ import { deleteEndedSessions, deleteSession, deleteSessionsOf, findSession, inse
 
 const HOUR_MS = 3_600_000
 /** A session ends when it was not used for so long … */
-export const SESSION_IDLE_MS = 12 * HOUR_MS
+const SESSION_IDLE_MS = 12 * HOUR_MS
 /** … and at this age in any case. */
 export const SESSION_MAX_MS = 14 * 24 * HOUR_MS
 /** Use is noted no more often than this: a read needn't wait for a write to the disk. */

@@ -24,8 +24,6 @@ interface SignInAttempt {
   earlierSession: ActiveSession | null
 }
 
-export type SignInService = ReturnType<typeof createSignInService>
-
 /** Signing in by e-mail and password. Every failure reads and lasts the same. */
 export function createSignInService({ db, clock, sessions, hasher, guard }: SignInParts) {
   return {
