@@ -28,3 +28,16 @@ export type { LineFigures } from './estimate/lineFigures.ts'
 export type { LiveEstimate } from './estimate/liveEstimate.ts'
 export { openEstimate } from './estimate/openEstimate.ts'
 export { toEstimateInput } from './estimate/toEstimateInput.ts'
+
+export type { WorkbookContext, WorkbookPriceItem } from './workbook/workbookContext.ts'
+export { workbookSheets } from './workbook/workbookSheets.ts'
+
+export type { EstimateDocument } from './document/estimateDocument.ts'
+export type { KeyedEstimate } from './document/documentSchema.ts'
+export type { KeyedHouse } from './document/houseDocument.ts'
+export type { KeyedLine } from './document/lineDocument.ts'
+export type { KeyedRoom } from './document/roomDocument.ts'
+export { readEstimateDocument, type ReadDocument } from './document/readEstimateDocument.ts'
+export { writeEstimateDocument } from './document/writeEstimateDocument.ts'
+
+export type { WorkbookContext, WorkbookPriceItem } from './workbook/workbookContext.ts'

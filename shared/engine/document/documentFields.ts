@@ -1,0 +1,90 @@
+import { z } from 'zod'
+import { LENGTH_MAX_IN, LINE_MAX_CENTS, UNIT_PRICE_MAX_E4, type LowLikelyHigh } from '../../schemas/common.ts'
+import { PARTS_OF_INCH } from '../units/formatLength.ts'
+import { parseLength } from '../units/parseLength.ts'
+
+type Read<T> = { value: T } | { code: string; message: string }
+
+/** A field that is read by a function of its own; what it refuses becomes the field's problem, with its code. */
+function readField<T>(read: (value: unknown) => Read<T>) {
+  return z.unknown().transform((value, context): T => {
+    const result = value === undefined ? { code: 'invalid-type', message: 'is missing' } : read(value)
+    if ('value' in result) return result.value
+    context.addIssue({ code: 'custom', message: result.message, params: { code: result.code } })
+    return z.NEVER
+  })
+}
+
+/** A length more than zero, to inches: text in any notation, or a number of feet. */
+export const lengthField = readField(readLength)
+/** The same, or zero. */
+export const lengthOrZeroField = readField((value) => (isZero(value) ? { value: 0 } : readLength(value)))
+/** A place on a plan: it may be zero, and below zero. */
+export const placeField = readField(readPlace)
+/** Dollars to whole cents. */
+export const amountField = readField((value) => readDollars(value, 2, LINE_MAX_CENTS, 'one billion dollars'))
+/** Dollars to ten-thousandths. */
+export const unitPriceField = readField((value) => readDollars(value, 4, UNIT_PRICE_MAX_E4, 'one million dollars'))
+/** A number, or a decimal string. */
+export const decimalField = readField(readDecimal)
+
+export const unitPriceRangeField = rangeOf(unitPriceField)
+export const amountRangeField = rangeOf(amountField)
+
+function rangeOf(field: typeof amountField) {
+  return z.strictObject({ low: field, likely: field, high: field }).superRefine((range: LowLikelyHigh, context) => {
+    const isInOrder = range.low <= range.likely && range.likely <= range.high
+    if (!isInOrder)
+      context.addIssue({ code: 'custom', message: 'low, likely and high must go up in that order', params: { code: 'out-of-order' } })
+  })
+}
+
+function readLength(value: unknown): Read<number> {
+  if (typeof value === 'number') return readFeet(value)
+  if (typeof value !== 'string') return { code: 'invalid-type', message: 'must be a length, as "12\' 6\\"", or a number of feet' }
+  const length = parseLength(value)
+  return length.ok ? { value: length.inches } : { code: 'bad-length', message: length.message }
+}
+
+function readFeet(feet: number): Read<number> {
+  const inches = hold(feet * 12)
+  if (!(inches > 0)) return { code: 'bad-length', message: `${feet} is not more than zero. A number is feet: write 12.5.` }
+  if (inches > LENGTH_MAX_IN) return { code: 'bad-length', message: `${feet} is longer than half a mile. A number is feet: write 12.5.` }
+  return { value: inches }
+}
+
+function readPlace(value: unknown): Read<number> {
+  if (isZero(value)) return { value: 0 }
+  const isBelow = typeof value === 'number' ? value < 0 : typeof value === 'string' && /^\s*[-−]/.test(value)
+  if (!isBelow) return readLength(value)
+  const read = readLength(typeof value === 'number' ? -value : String(value).replace(/^\s*[-−]\s*/, ''))
+  return 'value' in read ? { value: -read.value } : read
+}
+
+/** `0`, `"0"`, `"0'"`, `0 in` … */
+function isZero(value: unknown): boolean {
+  return value === 0 || (typeof value === 'string' && /^\s*0+(?:\.0+)?\s*(?:['"′″’”]|ft|in|m|cm|mm)?\s*$/i.test(value))
+}
+
+function hold(inches: number): number {
+  return Math.round(inches * PARTS_OF_INCH) / PARTS_OF_INCH
+}
+
+function readDollars(value: unknown, decimals: number, most: number, mostWords: string): Read<number> {
+  if (typeof value !== 'string') return { code: 'invalid-type', message: 'must be a decimal string of dollars, as "1250.00"' }
+  const parts = /^\s*(-?)(\d*)(?:\.(\d*))?\s*$/.exec(value)
+  const [, sign = '', whole = '', fraction = ''] = parts ?? []
+  if (parts === null || whole + fraction === '') return { code: 'bad-amount', message: 'must be a decimal string of dollars, as "1250.00"' }
+  if (fraction.length > decimals)
+    return { code: 'too-many-decimals', message: `has ${fraction.length} decimals; at most ${decimals} are taken here` }
+  const scaled = Number(`${whole}${fraction.padEnd(decimals, '0')}`)
+  if (sign === '-' && scaled > 0) return { code: 'negative', message: 'must not be negative' }
+  if (scaled > most) return { code: 'too-large', message: `must be at most ${mostWords}` }
+  return { value: scaled }
+}
+
+function readDecimal(value: unknown): Read<number> {
+  if (typeof value === 'number') return { value }
+  const isDecimal = typeof value === 'string' && /^\s*(?:\d+(?:\.\d*)?|\.\d+)\s*$/.test(value)
+  return isDecimal ? { value: Number(value) } : { code: 'invalid-type', message: 'must be a number, or a decimal string as "22.5"' }
+}

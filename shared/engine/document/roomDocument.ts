@@ -1,0 +1,57 @@
+import { z } from 'zod'
+import { nameSchema, noteSchema } from '../../schemas/common.ts'
+import {
+  DEDUCTION_KINDS,
+  OPENING_COUNT_MAX,
+  OPENING_KINDS,
+  ROOM_OPENINGS_MAX,
+  ROOM_USES,
+  type Deduction,
+  type Opening,
+  type RoomFields,
+} from '../../schemas/room.ts'
+import { lengthField } from './documentFields.ts'
+import { documentKey } from './documentKey.ts'
+import { ceilingDocument, shapeDocument } from './shapeDocument.ts'
+
+/** A room of a document: what a person keys of it, and its key there. */
+export type KeyedRoom = RoomFields & { key: string }
+
+const count = z.int().min(1).max(OPENING_COUNT_MAX).default(1)
+
+const openingDocument = z
+  .strictObject({
+    kind: z.enum(OPENING_KINDS),
+    width: lengthField,
+    height: lengthField,
+    count,
+    fromWalls: z.boolean().default(true),
+    fromBase: z.boolean().default(true),
+  })
+  .transform(({ width, height, ...rest }): Opening => ({ ...rest, widthIn: width, heightIn: height }))
+
+const deductionDocument = z
+  .strictObject({
+    kind: z.enum(DEDUCTION_KINDS),
+    width: lengthField,
+    height: lengthField,
+    depth: lengthField,
+    count,
+    fromWalls: z.boolean().default(true),
+    fromFloor: z.boolean().default(false),
+    fromBase: z.boolean().default(true),
+  })
+  .transform(({ width, height, depth, ...rest }): Deduction => ({ ...rest, widthIn: width, heightIn: height, depthIn: depth }))
+
+export const roomDocument = z
+  .strictObject({
+    key: documentKey,
+    name: nameSchema,
+    use: z.enum(ROOM_USES).default('other'),
+    shape: shapeDocument,
+    ceiling: ceilingDocument.nullish(),
+    openings: z.array(openingDocument).max(ROOM_OPENINGS_MAX).default([]),
+    deductions: z.array(deductionDocument).max(ROOM_OPENINGS_MAX).default([]),
+    note: noteSchema.default(''),
+  })
+  .transform(({ ceiling, ...rest }): KeyedRoom => ({ ...rest, ceiling: ceiling ?? null }))
