@@ -5,7 +5,18 @@ const apiAddress = `http://127.0.0.1:${process.env.PORT ?? 4400}`
 
 export default defineConfig({
   plugins: [vue()],
-  build: { outDir: 'dist', target: 'es2022', sourcemap: false, chunkSizeWarningLimit: 1200 },
+  build: {
+    outDir: 'dist',
+    target: 'es2022',
+    sourcemap: false,
+    chunkSizeWarningLimit: 1200,
+    rolldownOptions: {
+      output: {
+        // zod tries once whether code may be made from text. The content security policy refuses that and the browser reports it, so zod is told before it starts.
+        intro: (chunk) => (chunk.moduleIds.some((id) => id.includes('/zod/')) ? 'globalThis.__zod_globalConfig={jitless:true};' : ''),
+      },
+    },
+  },
   server: { port: 5173, proxy: { '/api': apiAddress } },
   test: {
     projects: [
