@@ -39,5 +39,3 @@ export type { KeyedLine } from './document/lineDocument.ts'
 export type { KeyedRoom } from './document/roomDocument.ts'
 export { readEstimateDocument, type ReadDocument } from './document/readEstimateDocument.ts'
 export { writeEstimateDocument } from './document/writeEstimateDocument.ts'
-
-export type { WorkbookContext, WorkbookPriceItem } from './workbook/workbookContext.ts'
