@@ -21,7 +21,7 @@ const EVIDENCE_MEANING: Record<Evidence, string> = {
 /** One section of the sheet: a heading and rows of a topic and its words. */
 interface Section {
   heading: string
-  rows: readonly { topic: string; words: string; style?: StyleName }[]
+  rows: readonly { topic: string; words: string; topicStyle?: StyleName; style?: StyleName }[]
 }
 
 /** What the figures rest on, what isn't in them, and what can hurt someone. */
@@ -34,8 +34,8 @@ export function assumptionsSheet(whole: EstimateWhole, lines: readonly WorkbookL
     if (rows.length === 0) continue
     draft.setRow(row, 1, [text(heading, 'heading'), text('', 'heading')])
     row += 1
-    for (const { topic, words, style = 'text' } of rows) {
-      draft.setRow(row, 1, [text(topic, 'label'), text(words, style)])
+    for (const { topic, words, topicStyle = 'label', style = 'text' } of rows) {
+      draft.setRow(row, 1, [text(topic, topicStyle), text(words, style)])
       row += 1
     }
     row += 1
@@ -61,7 +61,7 @@ function noticeRows({ firm }: WorkbookContext): Section['rows'] {
         {
           topic: 'Demonstration',
           words: 'The firm, the house, the people and every price in this workbook are invented.',
-          style: 'caution' as const,
+          topicStyle: 'caution-label' as const,
         },
       ]
     : []
@@ -70,7 +70,11 @@ function noticeRows({ firm }: WorkbookContext): Section['rows'] {
 
 function cautionRows({ house, lines }: EstimateWhole): Section['rows'] {
   const cautions = cautionsFor({ yearBuilt: house.yearBuilt, systems: [...new Set(lines.map(({ system }) => system))] })
-  return cautions.map(({ title, text: words, source }) => ({ topic: title, words: `${words}\n(${source})`, style: 'caution' as const }))
+  return cautions.map(({ title, text: words, source }) => ({
+    topic: title,
+    words: `${words}\n(${source})`,
+    topicStyle: 'caution-label' as const,
+  }))
 }
 
 function readingRows({ estimate: { settings } }: EstimateWhole): Section['rows'] {

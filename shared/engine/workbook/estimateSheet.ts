@@ -4,6 +4,7 @@ import { basisWords } from './basisWords.ts'
 import { evidenceWords } from './evidenceWords.ts'
 import { ESTIMATE_COLUMN as COLUMN, ESTIMATE_FIRST_ROW, ESTIMATE_HEAD_ROW, type EstimateLayout } from './estimateLayout.ts'
 import { amountFormula, hoursFormula, quantityFormula, sumFormula } from './moneyFormulas.ts'
+import { sumOfHours } from './lineSums.ts'
 import { unitDollars, type PricesSheet } from './pricesSheet.ts'
 import { live, number, SheetDraft, text } from './sheetDraft.ts'
 import { SHEET_TITLES } from './sheetTitles.ts'
@@ -12,16 +13,16 @@ import type { WorkbookCell, WorkbookSheet } from './workbookModel.ts'
 
 const HEADS: readonly (readonly [head: string, width: number])[] = [
   ['No.', 5],
-  ['System', 16],
-  ['Room', 15],
-  ['Description', 30],
-  ['Basis', 11],
-  ['Evidence', 12],
+  ['System', 14],
+  ['Room', 13],
+  ['Description', 26],
+  ['Basis', 10],
+  ['Evidence', 11],
   ['Measured', 10],
   ['Waste, %', 7],
-  ['Package', 9],
+  ['Package', 8.5],
   ['Quantity', 10],
-  ['Unit', 7],
+  ['Unit', 6.5],
   ['Low', 10],
   ['Likely', 10],
   ['High', 10],
@@ -30,7 +31,7 @@ const HEADS: readonly (readonly [head: string, width: number])[] = [
   ['Likely', 12],
   ['High', 12],
   ['Hours', 8],
-  ['Note', 34],
+  ['Note', 28],
   ['Trade', 20],
   ['Room no.', 9],
   ['Hours a unit', 12],
@@ -72,7 +73,6 @@ export interface EstimateSheetParts {
   /** The measured quantity of a line that counts: a live formula over the rooms sheet, or the number that was keyed. */
   measuredCell(line: WorkbookLine): WorkbookCell
   directCents: LowLikelyHigh
-  hours: number
 }
 
 /** One row a line, from what was measured to what it comes to, and a foot that the columns add up to. */
@@ -140,6 +140,7 @@ function setFigures(draft: SheetDraft, row: number, workbookLine: WorkbookLine, 
       live(amountFormula(at(COLUMN.quantity), at(PRICE_COLUMN[end]), minimum), figures.amountCents[end] / 100, 'money'),
     )
   }
+  draft.set(row, COLUMN.hours, text(''))
   if (isOwnHands) {
     draft.set(row, COLUMN.hours, live(hoursFormula(at(COLUMN.quantity), at(COLUMN.hoursPerUnit)), figures.hours, 'hours'))
     draft.set(row, COLUMN.hoursPerUnit, number(line.hoursPerUnit, 'input-number'))
@@ -156,6 +157,16 @@ function priceCell(workbookLine: WorkbookLine, end: keyof LowLikelyHigh, prices:
 }
 
 function setLeftOut(draft: SheetDraft, row: number, { problem, line }: WorkbookLine): void {
+  const noFigures = [
+    COLUMN.measured,
+    COLUMN.package,
+    COLUMN.quantity,
+    ...Object.values(PRICE_COLUMN),
+    COLUMN.minimum,
+    ...Object.values(AMOUNT_COLUMN),
+    COLUMN.hours,
+  ]
+  for (const column of noFigures) draft.set(row, column, text(''))
   const note = `Left out of the sums: ${problem ?? 'it has no figures'}`
   draft.set(row, COLUMN.note, text(line.note === '' ? note : `${note}\n${line.note}`, 'problem'))
   draft.set(row, COLUMN.counted, text('no'))
@@ -166,7 +177,7 @@ function lineNote({ line }: WorkbookLine): string {
   return [ownPrice, line.note].filter((part) => part !== '').join('\n')
 }
 
-function setFoot(draft: SheetDraft, { layout, directCents, hours, lines }: EstimateSheetParts): void {
+function setFoot(draft: SheetDraft, { layout, directCents, lines }: EstimateSheetParts): void {
   const row = layout.footRow
   const counted = lines.filter(({ problem }) => problem === null).length
   for (let column = COLUMN.number; column <= COLUMN.note; column += 1) draft.set(row, column, text('', 'foot-label'))
@@ -177,5 +188,5 @@ function setFoot(draft: SheetDraft, { layout, directCents, hours, lines }: Estim
   for (const end of ENDS) {
     draft.set(row, AMOUNT_COLUMN[end], live(sumFormula(columnOfLines(AMOUNT_COLUMN[end])), directCents[end] / 100, 'foot-money'))
   }
-  draft.set(row, COLUMN.hours, live(sumFormula(columnOfLines(COLUMN.hours)), hours, 'foot-hours'))
+  draft.set(row, COLUMN.hours, live(sumFormula(columnOfLines(COLUMN.hours)), sumOfHours(lines), 'foot-hours'))
 }

@@ -2,7 +2,7 @@ import type { LowLikelyHigh } from '../../schemas/common.ts'
 import type { Basis } from '../../schemas/estimate.ts'
 import { sheetAddress } from './cellAddress.ts'
 import { basisWords } from './basisWords.ts'
-import { EstimateLayout } from './estimateLayout.ts'
+import type { EstimateLayout } from './estimateLayout.ts'
 import { live, number, SheetDraft, text } from './sheetDraft.ts'
 import { SHEET_TITLES } from './sheetTitles.ts'
 import type { WorkbookContext } from './workbookContext.ts'
@@ -48,7 +48,7 @@ export function pricesSheet(lines: readonly WorkbookLine[], context: WorkbookCon
       'subtitle',
     ),
   )
-  draft.setRow(FIRST_ROW - 1, 1, headCells(HEADS, [COLUMN.low, COLUMN.likely, COLUMN.high]))
+  draft.setRow(FIRST_ROW - 1, 1, headCells(HEADS, [COLUMN.low, COLUMN.likely, COLUMN.high, COLUMN.version]))
   const items = new Map(context.items.map((item) => [item.key, item]))
   ;[...used.values()].forEach((price, index) => {
     const item = items.get(price.itemKey)

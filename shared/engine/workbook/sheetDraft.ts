@@ -1,4 +1,5 @@
 import { cellText } from './cellText.ts'
+import { rowHeight } from './rowHeight.ts'
 import type {
   CellRange,
   ChoiceRule,
@@ -29,7 +30,7 @@ export function live(formula: string, result: number | string, style: StyleName)
 /** A sheet while it is put together: cells are set by row and column, both from 1. */
 export class SheetDraft {
   readonly names: NamedCell[] = []
-  private readonly rows: WorkbookRow[] = []
+  private readonly rows: Pick<WorkbookRow, 'cells'>[] = []
   private readonly merges: CellRange[] = []
   private readonly choices: ChoiceRule[] = []
 
@@ -57,10 +58,6 @@ export class SheetDraft {
     this.names.push({ name, sheet: this.name, row, column })
   }
 
-  height(row: number, points: number): void {
-    this.rowAt(row).height = points
-  }
-
   merge(row: number, fromColumn: number, toColumn: number): void {
     this.merges.push({ top: row, left: fromColumn, bottom: row, right: toColumn })
   }
@@ -80,7 +77,7 @@ export class SheetDraft {
     return {
       name: this.name,
       columns,
-      rows: this.rows,
+      rows: this.rows.map(({ cells }, index) => ({ cells, height: rowHeight(cells, index + 1, columns, this.merges) })),
       merges: this.merges,
       choices: this.choices,
       frozen: layout.frozen,
@@ -88,7 +85,7 @@ export class SheetDraft {
     }
   }
 
-  private rowAt(row: number): WorkbookRow {
+  private rowAt(row: number): Pick<WorkbookRow, 'cells'> {
     while (this.rows.length < row) this.rows.push({ cells: [] })
     const found = this.rows[row - 1]
     if (!found) throw new RangeError(`Rows count from 1, not ${row}`)

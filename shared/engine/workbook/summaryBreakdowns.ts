@@ -1,10 +1,10 @@
-import type { LowLikelyHigh } from '../../schemas/common.ts'
 import { HOUSE_SYSTEMS } from '../../catalogue/houseSystems.ts'
 import { TRADES } from '../../catalogue/trades.ts'
 import { cellAddress, fixedAddress } from './cellAddress.ts'
 import { ESTIMATE_COLUMN } from './estimateLayout.ts'
+import { sumOfCents, sumOfHours } from './lineSums.ts'
 import { sumFormula, sumWhereFormula } from './moneyFormulas.ts'
-import { ribbonFormula, ribbonText } from './rangeRibbon.ts'
+import { CLEAR, ribbonFormula, ribbonText } from './rangeRibbon.ts'
 import { live, number, text, type SheetDraft } from './sheetDraft.ts'
 import { SUMMARY_COLUMN as COLUMN } from './summaryColumns.ts'
 import type { SummaryParts } from './summarySheet.ts'
@@ -12,7 +12,7 @@ import { HOUSE_NUMBER, type WorkbookLine } from './workbookLines.ts'
 
 const ENDS = ['low', 'likely', 'high'] as const
 const AMOUNT_COLUMN = { low: ESTIMATE_COLUMN.amountLow, likely: ESTIMATE_COLUMN.amountLikely, high: ESTIMATE_COLUMN.amountHigh }
-const RIBBON_CHARS = 30
+const RIBBON_CHARS = 28
 
 /** One part of the house, and which lines it sums. */
 interface Part {
@@ -96,13 +96,13 @@ function setBreakdown(
   ])
   const top = firstRow + 1
   const footRow = top + parts.length
-  const most = Math.max(0, ...parts.map(({ lines }) => sumCents(lines).high)) / 100
+  const most = Math.max(0, ...parts.map(({ lines }) => sumOfCents(lines).high)) / 100
   const mostFormula = parts.length > 0 ? `MAX(${fixedAddress(top, COLUMN.high)}:${fixedAddress(footRow - 1, COLUMN.high)})` : '0'
   parts.forEach((part, index) => {
     const row = top + index
     const counted = layout.range(ESTIMATE_COLUMN.counted)
     const where = (column: number) => sumWhereFormula(layout.range(column), [[layout.range(criterionColumn), part.criterion(row)]])
-    const cents = sumCents(part.lines)
+    const cents = sumOfCents(part.lines)
     const dollars = { low: cents.low / 100, likely: cents.likely / 100, high: cents.high / 100 }
     draft.set(row, COLUMN.label, text(part.title, 'label'))
     draft.set(
@@ -114,10 +114,14 @@ function setBreakdown(
     draft.set(
       row,
       COLUMN.takenOn,
-      live(ribbonFormula({ ...cells, most: mostFormula }, RIBBON_CHARS), ribbonText(dollars, most, RIBBON_CHARS), 'ribbon-small'),
+      live(
+        ribbonFormula({ ...cells, most: mostFormula }, RIBBON_CHARS, CLEAR),
+        ribbonText(dollars, most, RIBBON_CHARS, CLEAR),
+        'ribbon-small',
+      ),
     )
     for (const end of ENDS) draft.set(row, COLUMN[end], live(where(AMOUNT_COLUMN[end]), dollars[end], 'money'))
-    draft.set(row, COLUMN.hours, live(where(ESTIMATE_COLUMN.hours), sumHours(part.lines), 'hours'))
+    draft.set(row, COLUMN.hours, live(where(ESTIMATE_COLUMN.hours), sumOfHours(part.lines), 'hours'))
   })
   setBreakdownFoot(
     draft,
@@ -129,7 +133,7 @@ function setBreakdown(
 }
 
 function setBreakdownFoot(draft: SheetDraft, top: number, row: number, lines: readonly WorkbookLine[]): void {
-  const cents = sumCents(lines)
+  const cents = sumOfCents(lines)
   const column = (of: number) => `${cellAddress(top, of)}:${cellAddress(row - 1, of)}`
   const isEmpty = row === top
   const sum = (of: number, result: number, style: 'foot-money' | 'foot-hours' | 'foot-count') =>
@@ -139,22 +143,10 @@ function setBreakdownFoot(draft: SheetDraft, top: number, row: number, lines: re
     sum(COLUMN.setting, countedLines(lines), 'foot-count'),
     text('', 'foot-label'),
     ...ENDS.map((end) => sum(COLUMN[end], cents[end] / 100, 'foot-money')),
-    sum(COLUMN.hours, sumHours(lines), 'foot-hours'),
+    sum(COLUMN.hours, sumOfHours(lines), 'foot-hours'),
   ])
 }
 
 function countedLines(lines: readonly WorkbookLine[]): number {
   return lines.filter(({ problem }) => problem === null).length
-}
-
-function sumCents(lines: readonly WorkbookLine[]): LowLikelyHigh {
-  const sum = { low: 0, likely: 0, high: 0 }
-  for (const { figures } of lines) {
-    if (figures) for (const end of ENDS) sum[end] += figures.amountCents[end]
-  }
-  return sum
-}
-
-function sumHours(lines: readonly WorkbookLine[]): number {
-  return lines.reduce((sum, { figures }) => sum + Math.round((figures?.hours ?? 0) * 100), 0) / 100
 }

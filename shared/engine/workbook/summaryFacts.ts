@@ -1,4 +1,5 @@
 import { ESTIMATE_COLUMN } from './estimateLayout.ts'
+import { sumOfHours } from './lineSums.ts'
 import { live, text, type SheetDraft } from './sheetDraft.ts'
 import { SUMMARY_COLUMN as COLUMN } from './summaryColumns.ts'
 import type { SummaryParts } from './summarySheet.ts'
@@ -14,17 +15,20 @@ export function setFacts(draft: SheetDraft, firstRow: number, parts: SummaryPart
     ['Kind', `${whole.house.kind}, ${whole.house.storeys === 1 ? '1 storey' : `${whole.house.storeys} storeys`}`],
   ]
   const right: [string, WorkbookCell, string?][] = [
-    ['Prepared for', text(context.preparedFor.join(', ') || 'not shared yet')],
-    ['Prepared by', text(context.preparedBy)],
-    ['Figures as of', text(whole.house.updatedAt.slice(0, 10))],
+    ['Prepared for', text(context.preparedFor.join(', ') || 'not shared yet', 'fact-right')],
+    ['Prepared by', text(context.preparedBy, 'fact-right')],
+    ['Figures as of', text(context.figuresAt.slice(0, 10), 'fact-right')],
     ['Lines counted', countedCell(parts, 'yes'), 'lines_counted'],
     ['Lines left out because of errors', countedCell(parts, 'no'), 'lines_left_out'],
     ['Hours of own hands', hoursCell(parts), 'own_hands_hours'],
   ]
-  left.forEach(([label, value], index) => draft.setRow(firstRow + index, COLUMN.label, [text(label, 'label'), text(value, 'fact')]))
+  left.forEach(([label, value], index) =>
+    draft.setRow(firstRow + index, COLUMN.label, [text(label, 'label'), text(value, 'fact'), text('', 'fact')]),
+  )
   right.forEach(([label, cell, name], index) => {
     const row = firstRow + index
-    draft.set(row, COLUMN.low, text(label, 'label'))
+    draft.setRow(row, COLUMN.low, [text(label, 'label'), text('', 'label')])
+    draft.merge(row, COLUMN.low, COLUMN.likely)
     if (name === undefined) draft.set(row, COLUMN.high, cell)
     else draft.setNamed(name, row, COLUMN.high, cell)
   })
@@ -41,6 +45,5 @@ function countedCell({ layout, lines }: SummaryParts, word: 'yes' | 'no'): Workb
 }
 
 function hoursCell({ layout, lines }: SummaryParts): WorkbookCell {
-  const hours = lines.reduce((sum, { figures }) => sum + Math.round((figures?.hours ?? 0) * 100), 0) / 100
-  return live(layout.foot(ESTIMATE_COLUMN.hours), hours, 'fact-hours')
+  return live(layout.foot(ESTIMATE_COLUMN.hours), sumOfHours(lines), 'fact-hours')
 }

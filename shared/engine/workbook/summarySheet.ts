@@ -8,12 +8,12 @@ import { setFacts } from './summaryFacts.ts'
 import { setTotals } from './summaryTotals.ts'
 import { live, SheetDraft, text } from './sheetDraft.ts'
 import { SHEET_TITLES } from './sheetTitles.ts'
-import { ribbonFormula, ribbonText } from './rangeRibbon.ts'
+import { DOTTED, ribbonFormula, ribbonText } from './rangeRibbon.ts'
 import type { WorkbookContext } from './workbookContext.ts'
 import type { WorkbookLine } from './workbookLines.ts'
 import type { NamedCell, WorkbookSheet } from './workbookModel.ts'
 
-const BIG_RIBBON_CHARS = 100
+const BIG_RIBBON_CHARS = 132
 const ENDS = ['low', 'likely', 'high'] as const
 
 export interface SummaryParts {
@@ -35,11 +35,7 @@ export function summarySheet(parts: SummaryParts): { sheet: WorkbookSheet; names
   setRange(draft, rangeRow, results, whole)
   const totalsEnd = setTotals(draft, rangeRow + 5, parts)
   const end = setBreakdowns(draft, totalsEnd + 2, parts)
-  draft.set(
-    end + 1,
-    1,
-    text('Not an inspection, an appraisal or an offer of credit. Assumptions and cautions stand on the last sheet.', 'small'),
-  )
+  draft.set(end + 1, 1, text('Assumptions and cautions stand on the last sheet.', 'small'))
   const sheet = draft.finish({
     widths: SUMMARY_WIDTHS,
     frozen: { rows: 0, columns: 0 },
@@ -68,8 +64,8 @@ function setRange(draft: SheetDraft, row: number, { totals }: EstimateResults, {
     row + 2,
     label,
     live(
-      ribbonFormula({ low: 'total_low', likely: 'total_likely', high: 'total_high', most: 'total_high' }, BIG_RIBBON_CHARS),
-      ribbonText({ low: least / 100, likely: likely / 100, high: high / 100 }, high / 100, BIG_RIBBON_CHARS),
+      ribbonFormula({ low: 'total_low', likely: 'total_likely', high: 'total_high', most: 'total_high' }, BIG_RIBBON_CHARS, DOTTED),
+      ribbonText({ low: least / 100, likely: likely / 100, high: high / 100 }, high / 100, BIG_RIBBON_CHARS, DOTTED),
       'ribbon',
     ),
   )

@@ -3,13 +3,13 @@ import type { Basis } from '../../schemas/estimate.ts'
 import { contingencyFormula, overheadFormula, taxFormula, totalFormula } from './adderFormulas.ts'
 import { basisWords } from './basisWords.ts'
 import { ESTIMATE_COLUMN } from './estimateLayout.ts'
+import { sumOfCents } from './lineSums.ts'
 import { sumWhereFormula } from './moneyFormulas.ts'
 import { TAX_RULE_CHOICES, taxRuleWords } from './settingsWords.ts'
 import { live, number, text, type SheetDraft } from './sheetDraft.ts'
 import { SUMMARY_COLUMN as COLUMN } from './summaryColumns.ts'
 import type { SummaryParts } from './summarySheet.ts'
 import type { WorkbookCell } from './workbookModel.ts'
-import type { WorkbookLine } from './workbookLines.ts'
 
 const ENDS = ['low', 'likely', 'high'] as const
 type End = (typeof ENDS)[number]
@@ -64,8 +64,18 @@ function totalsRows({ whole: { estimate }, results: { totals }, lines, layout }:
   const byBasis = (basis: Basis) => (end: End) =>
     sumWhereFormula(layout.range(AMOUNT_COLUMN[end]), [[layout.range(ESTIMATE_COLUMN.basis), `"${basisWords(basis)}"`]])
   return [
-    { label: 'Materials for own hands', name: 'own_hands', formula: byBasis('own-hands'), cents: sumOf(lines, 'own-hands') },
-    { label: 'Hired work', name: 'hired', formula: byBasis('hired'), cents: sumOf(lines, 'hired') },
+    {
+      label: 'Materials for own hands',
+      name: 'own_hands',
+      formula: byBasis('own-hands'),
+      cents: sumOfCents(lines.filter(({ line }) => line.basis === 'own-hands')),
+    },
+    {
+      label: 'Hired work',
+      name: 'hired',
+      formula: byBasis('hired'),
+      cents: sumOfCents(lines.filter(({ line }) => line.basis === 'hired')),
+    },
     { label: 'Direct cost', name: 'direct', formula: (end) => layout.foot(AMOUNT_COLUMN[end]), cents: totals.directCents },
     {
       label: 'Overhead and profit, %',
@@ -104,13 +114,4 @@ function contingencyRow(contingency: SummaryParts['whole']['estimate']['settings
   }
   const setting = { name: 'contingency_percent', cell: number(contingency.percent, 'input-percent') }
   return { ...row, label: 'Contingency, %', setting, takenOn: text('everything above') }
-}
-
-function sumOf(lines: readonly WorkbookLine[], basis: Basis): LowLikelyHigh {
-  const sum = { low: 0, likely: 0, high: 0 }
-  for (const { line, figures } of lines) {
-    if (line.basis !== basis || !figures) continue
-    for (const end of ENDS) sum[end] += figures.amountCents[end]
-  }
-  return sum
 }

@@ -14,6 +14,8 @@ export interface WorkbookContext {
   priceBook: { version: number; effectiveDate: string | null }
   /** The items that the lines name. */
   items: readonly WorkbookPriceItem[]
+  /** ISO time of the last change to what the figures follow from. */
+  figuresAt: string
   preparedBy: string
   preparedFor: readonly string[]
 }

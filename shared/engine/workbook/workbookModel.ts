@@ -6,6 +6,7 @@ export type StyleName =
   | 'heading'
   | 'heading-right'
   | 'fact'
+  | 'fact-right'
   | 'fact-count'
   | 'fact-hours'
   | 'range-label'
@@ -17,7 +18,7 @@ export type StyleName =
   | 'text'
   | 'small'
   | 'notice'
-  | 'caution'
+  | 'caution-label'
   | 'problem'
   | 'ribbon'
   | 'ribbon-small'
@@ -29,6 +30,7 @@ export type StyleName =
   | 'money'
   | 'unit-price'
   | 'input-number'
+  | 'input-quantity'
   | 'input-feet'
   | 'input-percent'
   | 'input-money'
@@ -48,8 +50,8 @@ export type WorkbookCell = { style: StyleName } & (
 )
 
 export interface WorkbookRow {
-  /** Points; left out, the row fits its text. */
-  height?: number
+  /** Points. */
+  height: number
   /** By column: `cells[0]` is column A. */
   cells: (WorkbookCell | undefined)[]
 }
@@ -86,6 +88,7 @@ export interface WorkbookSheet {
   name: string
   columns: WorkbookColumn[]
   rows: WorkbookRow[]
+  /** Cells side by side that are one. */
   merges: CellRange[]
   choices: ChoiceRule[]
   /** Rows and columns that stay in view. */
@@ -108,7 +111,6 @@ export interface WorkbookSheets {
   properties: {
     title: string
     creator: string
-    company: string
     /** ISO time that stands for both made and changed, so that the same estimate gives the same bytes. */
     madeAt: string
   }
