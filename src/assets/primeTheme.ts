@@ -1,5 +1,8 @@
 import { definePreset } from '@primevue/themes'
-import Aura from '@primevue/themes/aura'
+import base from '@primevue/themes/aura/base'
+import dialog from '@primevue/themes/aura/dialog'
+import drawer from '@primevue/themes/aura/drawer'
+import menu from '@primevue/themes/aura/menu'
 
 /** A scale of eleven shades between a wash and the deep shade, all of them words and grounds of tokens.css. */
 function shades(wash: string, colour: string, deep: string) {
@@ -40,11 +43,14 @@ const surface = {
   950: 'var(--ink)',
 }
 
+/** The tokens of the components that are used: those of all of them would be the larger part of a page. A component that is taken into use is added here. */
+const usedPart = { ...base, components: { dialog, drawer, menu } }
+
 /**
  * PrimeVue in the app's tokens. They flip with the theme by themselves, so there is one scheme here and not two,
  * and the selector for a dark one is switched off where the theme is installed.
  */
-export const primeTheme = definePreset(Aura, {
+export const primeTheme = definePreset<Record<string, unknown>>(usedPart, {
   primitive: {
     borderRadius: { none: '0', xs: '2px', sm: '3px', md: '4px', lg: '4px', xl: '4px' },
     emerald: brick,
