@@ -4,7 +4,7 @@ import type { DemoLine } from './lineTable.ts'
 import type { DemoRoom } from './roomParts.ts'
 
 /** An event that may turn out to cost, in the form of the estimate document. */
-export interface DemoUnknown {
+interface DemoUnknown {
   key: string
   description: string
   system: string
@@ -13,7 +13,7 @@ export interface DemoUnknown {
 }
 
 /** An inspection that would settle it, in the form of the estimate document. */
-export interface DemoInspection {
+interface DemoInspection {
   key: string
   description: string
   cost: string

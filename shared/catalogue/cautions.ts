@@ -12,7 +12,7 @@ export const documentNotices: readonly string[] = [
   'What is behind walls, under floors and below ground was not seen. Where something could not be seen, the estimate says so, and an inspection or a test by a licensed person comes before the work.',
   'Leave suspect materials undisturbed until a laboratory has tested them. Removal is the work of a licensed firm.',
   'Where a code is named, it is the model code, for comparison alone. The local code and the building official decide. Permits, licensed trades and utility marking are the owner’s duty and the contractor’s.',
-  'Low and high are what one in ten pays less than and one in ten pays more than. A contractor’s bid on the same scope replaces the figures here.',
+  'Unless it says otherwise, a price’s low and high are what one in ten pays less than and one in ten pays more than. A total’s low and high add all of them up, so most jobs end well inside. A contractor’s bid on the same scope replaces the figures here.',
 ]
 
 export interface CautionQuestion {

@@ -23,7 +23,7 @@ export const WORK_CAUTIONS: readonly Caution[] = [
     text: 'Wiring added from about 1965 to 1973 may be aluminum, whose connections overheat. Changing a device is not a cure: a licensed electrician looks at every connection and chooses the repair.',
     systems: ['electrical', 'lighting', 'kitchen', 'laundry'],
     appliesBeforeYear: 1974,
-    source: 'CPSC publication 516; NFPA 70 article 110.14',
+    source: 'CPSC publication 516; NFPA 70 section 110.14',
   },
   {
     key: 'gas',
