@@ -11,10 +11,12 @@ import { personOperations } from './features/accounts/personRoutes.ts'
 import { sessionOperations } from './features/accounts/sessionRoutes.ts'
 import { createSessionService } from './features/accounts/sessionService.ts'
 import { createEventHub, type EventHub } from './features/events/eventHub.ts'
+import { computeOperations } from './features/compute/computeRoutes.ts'
 import { createDomainServices } from './features/domainServices.ts'
 import { estimateOperations } from './features/estimates/estimateRoutes.ts'
 import { lineOperations } from './features/estimates/lineRoutes.ts'
 import { eventOperations } from './features/events/eventRoutes.ts'
+import { exchangeOperations } from './features/exchange/exchangeRoutes.ts'
 import { firmOperations } from './features/firm/firmRoutes.ts'
 import { healthOperations } from './features/health/healthRoutes.ts'
 import { openApiOperations } from './features/health/openApiRoutes.ts'
@@ -25,6 +27,8 @@ import { priceBookOperations } from './features/price-book/priceBookRoutes.ts'
 import { roomOperations } from './features/rooms/roomRoutes.ts'
 import { shareOperations } from './features/sharing/shareRoutes.ts'
 import { summaryOperations } from './features/summary/summaryRoutes.ts'
+import { workbookOperations } from './features/workbook/workbookRoutes.ts'
+import { createWorkbookService } from './features/workbook/workbookService.ts'
 import { apiRouter } from './http/apiRouter.ts'
 import type { Operation } from './http/operation.ts'
 import type { MailSender } from './mail/mailSender.ts'
@@ -37,6 +41,7 @@ import { sameOrigin } from './middleware/sameOrigin.ts'
 import { securityHeaders } from './middleware/securityHeaders.ts'
 import { serveClient } from './middleware/serveClient.ts'
 import { session } from './middleware/session.ts'
+import { startWorkbookThread } from './workers/workbookThread.ts'
 
 const MINUTE_MS = 60_000
 
@@ -64,7 +69,9 @@ export function buildApp(parts: AppParts): BuiltApp {
   const accounts = createAccountServices({ ...parts, events, sessions })
   const accountLimit = limitByAddress({ limit: config.limits.accountsPerQuarterHour, windowMs: 15 * MINUTE_MS })
   events.filterBy(mayHearOfChange(db))
-  const services = { ...parts, ...createDomainServices({ db, clock, events }), events, sessions, accounts, accountLimit }
+  const domain = createDomainServices({ db, clock, events })
+  const workbooks = createWorkbookService({ ...parts, ...domain, ...startWorkbookThread() })
+  const services = { ...parts, ...domain, events, sessions, accounts, accountLimit, workbooks }
 
   const described = [
     ...healthOperations(services),
@@ -80,6 +87,9 @@ export function buildApp(parts: AppParts): BuiltApp {
     ...estimateOperations(services),
     ...lineOperations(services),
     ...summaryOperations(services),
+    ...exchangeOperations(services),
+    ...workbookOperations(services),
+    ...computeOperations(),
     ...eventOperations(services),
   ]
   const operations = [...described, ...openApiOperations(described, packageInfo.version)]

@@ -1,3 +1,4 @@
+import { sql, type SQL } from 'drizzle-orm'
 import type { Database } from './client.ts'
 
 /**
@@ -13,4 +14,9 @@ export function prepared<T>(build: (db: Database) => T): (db: Database) => T {
     built.set(db, query)
     return query
   }
+}
+
+/** A placeholder of its own name for each column. It knows nothing of the column: JSON is to be handed over as text. */
+export function placeholders<const Column extends string>(columns: readonly Column[]): Record<Column, SQL> {
+  return Object.fromEntries(columns.map((column) => [column, sql`${sql.placeholder(column)}`])) as Record<Column, SQL>
 }

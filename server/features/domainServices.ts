@@ -6,6 +6,7 @@ import { createLineMaker } from './estimates/lineMaker.ts'
 import { createLineRepricer } from './estimates/lineRepricer.ts'
 import { createLineService } from './estimates/lineService.ts'
 import type { EventHub } from './events/eventHub.ts'
+import { createExchangeService } from './exchange/exchangeService.ts'
 import { createHouseService } from './houses/houseService.ts'
 import { createDraftService } from './price-book/draftService.ts'
 import { createPriceBookService } from './price-book/priceBookService.ts'
@@ -31,5 +32,6 @@ export function createDomainServices(parts: { db: Database; clock: Clock; events
     lines: createLineService({ ...parts, keeper, maker }),
     shares: createShareService(parts),
     summaries: createSummaryService({ ...parts, estimates, priceBook }),
+    exchange: createExchangeService({ ...parts, estimates, priceBook, keeper }),
   }
 }

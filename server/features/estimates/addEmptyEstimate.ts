@@ -7,6 +7,8 @@ export interface NewEstimate {
   /** Left out, a new one is made. */
   id?: string
   houseId: string
+  /** Left out, it is called the working estimate. */
+  name?: string
   regionKey: string
   priceBookVersion: number
   settings: EstimateSettings
@@ -28,9 +30,8 @@ const NO_TOTALS: Totals = {
 /** Adds the working estimate of a new house and gives its id. It is not computed yet: the keeper's refresh makes it version 1. */
 export function addEmptyEstimate(
   tx: Queryable,
-  { id = newId(), houseId, regionKey, priceBookVersion, settings, unknowns, inspections, at }: NewEstimate,
+  { id = newId(), name = 'Working estimate', unknowns = [], inspections = [], at, ...given }: NewEstimate,
 ): string {
-  const kept = { unknowns: unknowns ?? [], inspections: inspections ?? [], totals: NO_TOTALS, errorCount: 0 }
-  insertEstimate(tx, { id, houseId, name: 'Working estimate', version: 0, priceBookVersion, regionKey, settings, ...kept }, at)
+  insertEstimate(tx, { ...given, id, name, unknowns, inspections, version: 0, totals: NO_TOTALS, errorCount: 0 }, at)
   return id
 }

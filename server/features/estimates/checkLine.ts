@@ -8,20 +8,25 @@ import { invalid } from '../../errors/AppError.ts'
 const systemKeys: readonly string[] = SYSTEM_KEYS
 const tradeKeys: readonly string[] = TRADE_KEYS
 
+type Checked = Pick<Line, 'itemKey' | 'system' | 'trade' | 'unit' | 'override'>
+
 /**
- * The line with its unit by the catalogue's spelling. Throws 422 for what no line can have.
+ * The line with its unit by the catalogue's spelling. Throws 422 for what no line can be given; what a line brought along from an import may stay.
  * A formula that can't be computed is not among that: it stays as typed, is marked, and the totals leave the line out.
  */
-export function checkedLine<T extends Pick<Line, 'itemKey' | 'system' | 'trade' | 'unit' | 'override'>>(line: T): T {
+export function checkedLine<T extends Checked>(line: T, before: Checked | null = null): T {
+  const hasNew = (field: keyof Checked) => line[field] !== before?.[field]
   const unit = findUnit(line.unit)
   const isOwnLine = line.itemKey === null
   const problems: FieldProblem[] = []
-  if (!systemKeys.includes(line.system)) problems.push({ path: 'system', code: 'unknown-system', message: 'is not a house system' })
-  if (!tradeKeys.includes(line.trade)) problems.push({ path: 'trade', code: 'unknown-trade', message: 'is not a trade' })
-  if (!unit) problems.push({ path: 'unit', code: 'unknown-unit', message: 'is not a unit that is known here; write sf, lf, each …' })
-  if (isOwnLine && line.override === null) {
+  if (hasNew('system') && !systemKeys.includes(line.system))
+    problems.push({ path: 'system', code: 'unknown-system', message: 'is not a house system' })
+  if (hasNew('trade') && !tradeKeys.includes(line.trade)) problems.push({ path: 'trade', code: 'unknown-trade', message: 'is not a trade' })
+  if (hasNew('unit') && !unit)
+    problems.push({ path: 'unit', code: 'unknown-unit', message: 'is not a unit that is known here; write sf, lf, each …' })
+  const losesPrice = isOwnLine && line.override === null && (hasNew('itemKey') || hasNew('override'))
+  if (losesPrice)
     problems.push({ path: 'override', code: 'missing', message: 'is missing: a line of your own needs a price and its reason' })
-  }
   if (problems.length > 0) throw invalid(problems)
   return { ...line, unit: unit?.key ?? line.unit }
 }

@@ -1,7 +1,7 @@
 import { and, asc, eq, isNull, sql } from 'drizzle-orm'
 import type { Estimate, Totals } from '../../../shared/schemas/estimate.ts'
 import type { Database, Queryable } from '../../db/client.ts'
-import { prepared } from '../../db/prepared.ts'
+import { placeholders, prepared } from '../../db/prepared.ts'
 import { estimates } from '../../db/schema/estimates.ts'
 import { houses } from '../../db/schema/houses.ts'
 
@@ -71,7 +71,7 @@ export function updateEstimateFields(db: Queryable, id: string, fields: Partial<
 const totalsQuery = prepared((db) =>
   db
     .update(estimates)
-    .set(Object.fromEntries(['version', 'totals', 'errorCount', 'updatedAt'].map((column) => [column, sql`${sql.placeholder(column)}`])))
+    .set(placeholders(['version', 'totals', 'errorCount', 'updatedAt']))
     .where(eq(estimates.id, sql.placeholder('id')))
     .prepare(),
 )

@@ -1,7 +1,7 @@
 import { and, asc, desc, eq, gt, isNull, sql } from 'drizzle-orm'
 import type { Line } from '../../../shared/schemas/estimate.ts'
 import type { Database, Queryable } from '../../db/client.ts'
-import { prepared } from '../../db/prepared.ts'
+import { placeholders, prepared } from '../../db/prepared.ts'
 import { estimateLines } from '../../db/schema/estimateLines.ts'
 
 type LineRow = typeof estimateLines.$inferSelect
@@ -89,13 +89,7 @@ export function updatePosition(db: Queryable, id: string, position: number): voi
   db.update(estimateLines).set({ position }).where(eq(estimateLines.id, id)).run()
 }
 
-export function insertLine(db: Queryable, line: Line, at: string): void {
-  db.insert(estimateLines)
-    .values({ ...rowOfLine(line), createdAt: at, updatedAt: at })
-    .run()
-}
-
-const UPDATED_COLUMNS = [
+const KEPT_COLUMNS = [
   'roomId',
   'itemKey',
   'system',
@@ -118,21 +112,37 @@ const UPDATED_COLUMNS = [
   'updatedAt',
 ] as const satisfies (keyof LineRow)[]
 
+const ADDED_COLUMNS = ['id', 'estimateId', 'createdAt'] as const satisfies (keyof LineRow)[]
+
 const updateQuery = prepared((db) =>
   db
     .update(estimateLines)
-    .set(Object.fromEntries(UPDATED_COLUMNS.map((column) => [column, sql`${sql.placeholder(column)}`])))
+    .set(placeholders(KEPT_COLUMNS))
     .where(eq(estimateLines.id, sql.placeholder('id')))
     .prepare(),
 )
 
-export function updateLine(db: Database, line: Line, at: string): void {
-  const { override, bookMaterials, bookInstalled, ...plain } = rowOfLine(line)
-  const jsonTexts = { override: jsonOrNull(override), bookMaterials: jsonOrNull(bookMaterials), bookInstalled: jsonOrNull(bookInstalled) }
-  updateQuery(db).run({ ...plain, ...jsonTexts, updatedAt: at })
+const insertQuery = prepared((db) =>
+  db
+    .insert(estimateLines)
+    .values(placeholders([...KEPT_COLUMNS, ...ADDED_COLUMNS]))
+    .prepare(),
+)
+
+export function insertLine(db: Database, line: Line, at: string): void {
+  insertQuery(db).run({ ...boundLine(line), createdAt: at, updatedAt: at })
 }
 
-/** A bare placeholder knows nothing of its column's JSON mode. */
+export function updateLine(db: Database, line: Line, at: string): void {
+  updateQuery(db).run({ ...boundLine(line), updatedAt: at })
+}
+
+/** What the placeholders are filled with: a bare one knows nothing of its column's JSON mode. */
+function boundLine(line: Line) {
+  const { override, bookMaterials, bookInstalled, ...plain } = rowOfLine(line)
+  return { ...plain, override: jsonOrNull(override), bookMaterials: jsonOrNull(bookMaterials), bookInstalled: jsonOrNull(bookInstalled) }
+}
+
 function jsonOrNull(value: object | null): string | null {
   return value && JSON.stringify(value)
 }

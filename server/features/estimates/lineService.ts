@@ -55,7 +55,7 @@ export function createLineService({ db, clock, keeper, maker }: LineParts) {
         const position = placeLine(db, estimateId, afterLineId ?? null)
         const made = checkedLine(maker.make(tx, head, fields))
         const line: Line = { ...made, id: newId(), estimateId, position, version: 1 }
-        repository.insertLine(tx, line, clock().toISOString())
+        repository.insertLine(db, line, clock().toISOString())
         const kept = finish(tx, user, head, { action: 'add', before: null, after: line, change: (live) => live.addLine(lineInput(line)) })
         return { line, ...kept }
       })
@@ -68,7 +68,7 @@ export function createLineService({ db, clock, keeper, maker }: LineParts) {
         const before = lineOf(db, estimateId, lineId)
         if (before.version !== ifMatch) throw stale(before)
         if (patch.roomId !== undefined && patch.roomId !== before.roomId) checkRoom(tx, head, patch.roomId)
-        const line = checkedLine({ ...maker.change(tx, head, before, patch), version: before.version + 1 })
+        const line = checkedLine({ ...maker.change(tx, head, before, patch), version: before.version + 1 }, before)
         repository.updateLine(db, line, clock().toISOString())
         const kept = finish(tx, user, head, {
           action: 'update',

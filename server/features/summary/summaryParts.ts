@@ -25,7 +25,10 @@ export function roomParts(live: LiveEstimate, rooms: readonly Room[]): SummaryPa
 
 function partsOf(live: LiveEstimate, by: 'system' | 'trade' | 'room', titles: readonly Titled[]): SummaryPart[] {
   const subtotals = live.subtotals(by)
-  return titles.flatMap(({ key, title }) => {
+  const known = new Set(titles.map(({ key }) => key))
+  // An imported line may name a system or a trade that is not in the catalogue: it comes last, by its key.
+  const others = [...subtotals.keys()].filter((key) => !known.has(key)).map((key) => ({ key, title: String(key) }))
+  return [...titles, ...others].flatMap(({ key, title }) => {
     const subtotal = subtotals.get(key)
     const hasLines = subtotal !== undefined && subtotal.lineCount > 0
     return hasLines ? [{ key, title, amountCents: subtotal.amountCents, hours: subtotal.hours, lineCount: subtotal.lineCount }] : []

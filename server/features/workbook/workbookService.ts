@@ -3,6 +3,7 @@ import type { WorkbookContext } from '../../../shared/engine/index.ts'
 import type { AppConfig } from '../../config/appConfig.ts'
 import type { Database } from '../../db/client.ts'
 import { notFound } from '../../errors/AppError.ts'
+import { fileTitle } from '../../http/fileTitle.ts'
 import type { MakeWorkbook } from '../../workers/workbookThread.ts'
 import type { EstimateService } from '../estimates/estimateService.ts'
 import { findFirm } from '../firm/firmRepository.ts'
@@ -58,16 +59,4 @@ export function createWorkbookService({ db, config, estimates, priceBook, makeWo
       return { content, fileName: `${fileTitle(head.houseName)}, estimate.xlsx`, version }
     },
   }
-}
-
-const FILE_TITLE_MAX = 80
-
-/** A house's name as a file can have it on any system. */
-function fileTitle(houseName: string): string {
-  const title = houseName
-    .slice(0, FILE_TITLE_MAX)
-    .replace(/[\\/:*?"<>|\p{Cc}\p{Surrogate}]/gu, ' ')
-    .replace(/\s+/g, ' ')
-    .replace(/^[. ]+|[. ]+$/g, '')
-  return title === '' ? 'House' : title
 }
