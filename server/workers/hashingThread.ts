@@ -1,3 +1,4 @@
+import type { Worker } from 'node:worker_threads'
 import { AppError } from '../errors/AppError.ts'
 import { createPasswordHasher, type PasswordHasher } from '../features/accounts/passwordHasher.ts'
 import type { HashJob, HashJobDone } from './hashingWorker.ts'
@@ -6,22 +7,39 @@ import { startWorker } from './startWorker.ts'
 /** At a third of a second each, whoever stands behind these waits too long: refuse rather than pile up. */
 const QUEUE_MAX = 40
 
-/** A password hasher on a thread of its own, so that a hash (a third of a second of one core) holds up no other request. */
+interface Waiting {
+  resolve(result: string | boolean): void
+  reject(error: Error): void
+}
+
+/**
+ * A password hasher on a thread of its own, so that a hash (a third of a second of one core) holds up no other request.
+ * The thread starts at once and anew after a crash.
+ */
 export function startHashingThread(cost: number): PasswordHasher & { stop(): Promise<void> } {
-  const waiting = new Map<number, { resolve: (result: string | boolean) => void; reject: (error: Error) => void }>()
-  const worker = startWorker(new URL('./hashingWorker.ts', import.meta.url), { cost })
+  const waiting = new Map<number, Waiting>()
+  let worker: Worker | null = null
   let lastId = 0
 
-  worker.on('message', ({ id, result }: HashJobDone) => {
-    waiting.get(id)?.resolve(result)
-    waiting.delete(id)
-  })
-  worker.on('error', failAll)
-  worker.on('exit', () => failAll(new Error('The hashing thread ended.')))
-  // After the listeners, which would hold the process open again.
-  worker.unref()
+  function running(): Worker {
+    if (worker) return worker
+    const started = startWorker(new URL('./hashingWorker.ts', import.meta.url), { cost })
+    started.on('message', ({ id, result }: HashJobDone) => {
+      waiting.get(id)?.resolve(result)
+      waiting.delete(id)
+    })
+    started.on('error', (error) => end(started, error))
+    started.on('exit', () => end(started, new Error('The hashing thread ended.')))
+    // After the listeners, which would hold the process open again.
+    started.unref()
+    worker = started
+    return started
+  }
 
-  function failAll(error: Error): void {
+  /** What was asked of a thread that is gone fails; the next question starts another. */
+  function end(ended: Worker, error: Error): void {
+    if (worker !== ended) return
+    worker = null
     for (const job of waiting.values()) job.reject(error)
     waiting.clear()
   }
@@ -31,18 +49,19 @@ export function startHashingThread(cost: number): PasswordHasher & { stop(): Pro
     return new Promise((resolve, reject) => {
       lastId += 1
       waiting.set(lastId, { resolve, reject })
-      worker.postMessage({ id: lastId, ...job })
+      running().postMessage({ id: lastId, ...job } satisfies HashJob)
     })
   }
 
-  const hasher = createPasswordHasher({
-    hash: async (password) => String(await perform({ password })),
-    compare: async (password, passwordHash) => (await perform({ password, passwordHash })) === true,
-  })
+  running()
+  const work = {
+    hash: async (password: string) => String(await perform({ password })),
+    compare: async (password: string, passwordHash: string) => (await perform({ password, passwordHash })) === true,
+  }
   return {
-    ...hasher,
+    ...createPasswordHasher(work, cost),
     async stop() {
-      await worker.terminate()
+      await worker?.terminate()
     },
   }
 }

@@ -20,8 +20,17 @@ describe.each([
     expect(await hasher.hash('seven quiet gutters')).not.toBe(await hasher.hash('seven quiet gutters'))
   })
 
-  it('answers no where there is no account', async () => {
-    expect(await hasher.matches('nobody has this password', null)).toBe(false)
+  it('answers no where there is no account, and takes as long about it', async () => {
+    const hash = await hasher.hash('seven quiet gutters')
+    const timed = async (passwordHash: string | null) => {
+      const begun = performance.now()
+      for (let time = 0; time < 40; time += 1) expect(await hasher.matches('some other words', passwordHash)).toBe(false)
+      return performance.now() - begun
+    }
+    await timed(null)
+    const ratio = (await timed(null)) / (await timed(hash))
+    expect(ratio).toBeGreaterThan(0.5)
+    expect(ratio).toBeLessThan(2)
   })
 
   it('keeps answers apart when many ask at once', async () => {
@@ -51,11 +60,13 @@ describe('the hashing thread', () => {
     expect(refused[0]).toMatchObject({ reason: { status: 503, headers: { 'Retry-After': '10' } } })
   })
 
-  it('fails what it was asked when it ends, instead of leaving it open', async () => {
+  it('fails what it was asked when it ends, instead of leaving it open, and starts anew for the next', async () => {
     const ending = startHashingThread(11)
     const hashed = ending.hash('seven quiet gutters')
     const failed = expect(hashed).rejects.toThrow('ended')
     await ending.stop()
     await failed
+    expect(await ending.hash('seven quiet gutters')).toMatch(/^\$2/)
+    await ending.stop()
   })
 })

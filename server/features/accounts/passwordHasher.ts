@@ -13,16 +13,17 @@ interface HashWork {
   compare(password: string, passwordHash: string): Promise<boolean>
 }
 
-/** A hasher over something that does the work: this thread here, a worker thread in use (`hashingThread.ts`). */
-export function createPasswordHasher(work: HashWork): PasswordHasher {
-  // Something to compare with when there is no account, so that a guesser can't tell by the clock. Made once, on first need.
-  let nobodysHash: Promise<string> | null = null
+/** Well-formed and nobody's: comparing with it takes as long as with a real hash of the same cost. */
+function nobodysHash(cost: number): string {
+  return `$2b$${String(cost).padStart(2, '0')}$${'nobodyhasthis'.repeat(5).slice(0, 53)}`
+}
 
+/** A hasher over something that does the work: this thread here, a worker thread in use (`hashingThread.ts`). */
+export function createPasswordHasher(work: HashWork, cost: number): PasswordHasher {
   return {
     hash: (password) => work.hash(password),
     async matches(password, passwordHash) {
-      nobodysHash ??= work.hash('nobody has this password')
-      const isSame = await work.compare(password, passwordHash ?? (await nobodysHash))
+      const isSame = await work.compare(password, passwordHash ?? nobodysHash(cost))
       // bcrypt reads 72 bytes and no more: what follows would be ignored, so a longer text is never the password.
       const isWholeRead = Buffer.byteLength(password) <= PASSWORD_MAX_BYTES
       return isSame && isWholeRead && passwordHash !== null
@@ -32,5 +33,5 @@ export function createPasswordHasher(work: HashWork): PasswordHasher {
 
 /** Hashes on this thread: for commands and tests, which keep nobody waiting. */
 export function createPasswordHasherHere(cost: number): PasswordHasher {
-  return createPasswordHasher({ hash: (password) => hash(password, cost), compare })
+  return createPasswordHasher({ hash: (password) => hash(password, cost), compare }, cost)
 }
