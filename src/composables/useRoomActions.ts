@@ -1,7 +1,11 @@
 import { useQueryClient } from '@tanstack/vue-query'
+import { onScopeDispose } from 'vue'
+import { housesQuery } from '../api/houses.ts'
 import { ProblemError } from '../api/http.ts'
 import { orderRooms, removeRoom, restoreRoom, roomsQuery, updateRoom } from '../api/rooms.ts'
+import type { HouseSummary } from '../../shared/schemas/house.ts'
 import type { RemovedRoom, Room, RoomPatch } from '../../shared/schemas/room.ts'
+import { onLiveEvent } from './useLiveEvents.ts'
 import { useUndoToast } from './useUndoToast.ts'
 
 /** What can be done to the rooms of a house as a list; the list on the screen follows at once and falls back to what is saved when a write fails. */
@@ -63,6 +67,14 @@ export function useRoomActions(houseId: string) {
     }
     await queries.invalidateQueries({ queryKey })
   }
+
+  // A room that somebody else writes comes as news of the estimate that stands on it.
+  const stopHearing = onLiveEvent(({ type, id }) => {
+    const houses = queries.getQueryData<HouseSummary[]>(housesQuery.queryKey)
+    const isOfAnotherHouse = houses?.some((house) => house.estimateId === id && house.id !== houseId)
+    if (type === 'estimate' && !isOfAnotherHouse) void queries.invalidateQueries({ queryKey })
+  })
+  onScopeDispose(stopHearing)
 
   return { save, takeIn, remove, reorder, tellOthers }
 }

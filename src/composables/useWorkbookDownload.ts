@@ -1,5 +1,6 @@
 import { onScopeDispose, ref } from 'vue'
 import { downloadWorkbook } from '../api/estimates.ts'
+import { saveFile } from './saveFile.ts'
 import { useErrorMessage } from './useErrorMessage.ts'
 
 const SHOWN_AFTER_MS = 500
@@ -21,8 +22,7 @@ export function useWorkbookDownload() {
     giveUp = new AbortController()
     const timer = setTimeout(() => (isSlow.value = true), SHOWN_AFTER_MS)
     try {
-      const { content, fileName } = await downloadWorkbook(estimateId, giveUp.signal)
-      keepFile(content, fileName)
+      saveFile(await downloadWorkbook(estimateId, giveUp.signal))
     } catch (error) {
       if (!giveUp.signal.aborted) problem.value = errorMessage(error)
     } finally {
@@ -38,13 +38,4 @@ export function useWorkbookDownload() {
 
   onScopeDispose(cancel)
   return { download, cancel, isUnderWay, isSlow, problem }
-}
-
-function keepFile(content: Blob, fileName: string): void {
-  const address = URL.createObjectURL(content)
-  const link = document.createElement('a')
-  link.href = address
-  link.download = fileName
-  link.click()
-  URL.revokeObjectURL(address)
 }

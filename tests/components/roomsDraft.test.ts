@@ -147,8 +147,8 @@ describe('readRoomDraft', () => {
 })
 
 describe('newRoomFields', () => {
-  it('needs a name and two lengths and brings the height along from the last room', () => {
-    const draft = blankDraft({ ceiling: { kind: 'flat', heightIn: 106 } })
+  it('needs a name and two lengths and brings the height along that most rooms have', () => {
+    const draft = blankDraft([106, 106, 80].map((heightIn) => ({ ceiling: { kind: 'flat', heightIn } })))
     expect(newRoomFields(draft)).toBeNull()
 
     Object.assign(draft, { name: 'Kitchen', use: 'kitchen', lengthText: '14', widthText: '3.81 m' })

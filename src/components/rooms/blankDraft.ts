@@ -5,9 +5,10 @@ import type { RoomDraft } from './roomDraft.ts'
 /** Most old and new ceilings are near it. */
 const USUAL_CEILING_IN = 96
 
-/** The form of a room that isn't there yet. The ceiling is taken from the last room: rooms of one storey mostly share it. */
-export function blankDraft(lastRoom: Pick<RoomFields, 'ceiling'> | null): RoomDraft {
-  const heightIn = lastRoom?.ceiling?.kind === 'flat' ? lastRoom.ceiling.heightIn : USUAL_CEILING_IN
+type Ceilinged = Pick<RoomFields, 'ceiling'>
+
+/** The form of a room that isn't there yet, its ceiling as high as most of the house's rooms, or as the last one where there are as many of another. */
+export function blankDraft(rooms: readonly Ceilinged[]): RoomDraft {
   return {
     name: '',
     use: 'other',
@@ -19,10 +20,20 @@ export function blankDraft(lastRoom: Pick<RoomFields, 'ceiling'> | null): RoomDr
     cutWidthText: '',
     walk: { start: [0, 0], headingDegrees: 0, runs: [] },
     ceilingKind: 'flat',
-    heightText: formatLength(heightIn),
+    heightText: formatLength(commonestHeight(rooms)),
     lowText: '',
     highText: '',
     openings: [],
     deductions: [],
   }
+}
+
+/** A cellar or an attic keyed last should not lower the next bedroom. */
+function commonestHeight(rooms: readonly Ceilinged[]): number {
+  const counts = new Map<number, number>()
+  for (const { ceiling } of rooms) if (ceiling?.kind === 'flat') counts.set(ceiling.heightIn, (counts.get(ceiling.heightIn) ?? 0) + 1)
+  return [...counts].reduce((best, [heightIn, count]) => (count >= best.count ? { heightIn, count } : best), {
+    heightIn: USUAL_CEILING_IN,
+    count: 0,
+  }).heightIn
 }

@@ -32,7 +32,7 @@ export function useRoomsPage(houseId: string, rooms: Readonly<Ref<Room[] | undef
   })
 
   const newKey = `new-${houseId}`
-  const newDraft = ref((drafts.takeUp(newKey)?.draft as RoomDraft | undefined) ?? blankDraft(null))
+  const newDraft = ref((drafts.takeUp(newKey)?.draft as RoomDraft | undefined) ?? blankDraft([]))
 
   const entries = computed<RoomEntry[]>(() =>
     (rooms.value ?? []).map((room) => {
@@ -54,7 +54,7 @@ export function useRoomsPage(houseId: string, rooms: Readonly<Ref<Room[] | undef
   }
 
   function startNew(): void {
-    newDraft.value = blankDraft(adds.waiting.value.at(-1)?.room ?? rooms.value?.at(-1) ?? null)
+    newDraft.value = blankDraft([...(rooms.value ?? []), ...adds.waiting.value.map(({ room }) => room)])
   }
 
   function add(fields: RoomFields): void {
