@@ -1,5 +1,5 @@
 /** Room left between neighbours, so that one can be put in between without moving the others. */
-export const POSITION_STEP = 1024
+const POSITION_STEP = 1024
 
 /** The place below the last (`null`: there is none). */
 export function positionAtEnd(last: number | null): number {

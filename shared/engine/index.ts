@@ -27,7 +27,7 @@ export type { Subtotal } from './estimate/groupSums.ts'
 export type { LineFigures } from './estimate/lineFigures.ts'
 export type { LiveEstimate } from './estimate/liveEstimate.ts'
 export { openEstimate } from './estimate/openEstimate.ts'
-export { toEstimateInput } from './estimate/toEstimateInput.ts'
+export { toEstimateInput, toLineInput, toRoomInput } from './estimate/toEstimateInput.ts'
 
 export type { WorkbookContext, WorkbookPriceItem } from './workbook/workbookContext.ts'
 export { workbookSheets } from './workbook/workbookSheets.ts'

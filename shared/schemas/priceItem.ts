@@ -82,9 +82,6 @@ export const priceRegionSchema = regionSchema.extend({ rowVersion: versionSchema
 export const regionPatchSchema = regionSchema.omit({ key: true }).partial()
 export const publishSchema = z.strictObject({ note: noteSchema.trim().min(1, 'say what changed'), effectiveDate: isoDateSchema })
 
-/** An item as one region pays for it: the factors are already in. */
-export const regionalItemSchema = priceItemSchema
-
 export const priceBookVersionSchema = z.object({
   version: versionSchema,
   status: z.enum(['draft', 'published']),

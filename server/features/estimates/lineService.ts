@@ -1,4 +1,4 @@
-import type { LiveEstimate } from '../../../shared/engine/index.ts'
+import { toLineInput, type LiveEstimate } from '../../../shared/engine/index.ts'
 import type { CurrentUser } from '../../../shared/schemas/account.ts'
 import { LINES_MAX, type Line, type LinePatch, type NewLine, type OrderedLines, type SavedLine } from '../../../shared/schemas/estimate.ts'
 import type { Clock } from '../../config/clock.ts'
@@ -9,7 +9,6 @@ import { recordAudit } from '../../db/recordAudit.ts'
 import { conflict, invalid, notFound, stale } from '../../errors/AppError.ts'
 import { findRoom } from '../rooms/roomRepository.ts'
 import { checkOrder } from '../rooms/checkOrder.ts'
-import { lineInput } from './lineInput.ts'
 import { checkedLine } from './checkLine.ts'
 import type { EstimateKeeper } from './estimateKeeper.ts'
 import type { EstimateHead } from './estimateRepository.ts'
@@ -56,7 +55,7 @@ export function createLineService({ db, clock, keeper, maker }: LineParts) {
         const made = checkedLine(maker.make(tx, head, fields))
         const line: Line = { ...made, id: newId(), estimateId, position, version: 1 }
         repository.insertLine(db, line, clock().toISOString())
-        const kept = finish(tx, user, head, { action: 'add', before: null, after: line, change: (live) => live.addLine(lineInput(line)) })
+        const kept = finish(tx, user, head, { action: 'add', before: null, after: line, change: (live) => live.addLine(toLineInput(line)) })
         return { line, ...kept }
       })
     },
@@ -74,7 +73,7 @@ export function createLineService({ db, clock, keeper, maker }: LineParts) {
           action: 'update',
           before,
           after: line,
-          change: (live) => live.setLine(lineId, lineInput(line)),
+          change: (live) => live.setLine(lineId, toLineInput(line)),
         })
         return { line, ...kept }
       })
@@ -109,7 +108,7 @@ export function createLineService({ db, clock, keeper, maker }: LineParts) {
           action: 'restore',
           before: null,
           after: line,
-          change: (live) => live.addLine(lineInput(line)),
+          change: (live) => live.addLine(toLineInput(line)),
         })
         return { line, ...kept }
       })

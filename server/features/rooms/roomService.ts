@@ -1,4 +1,4 @@
-import { checkShape, type LiveEstimate } from '../../../shared/engine/index.ts'
+import { checkShape, toRoomInput, type LiveEstimate } from '../../../shared/engine/index.ts'
 import type { CurrentUser } from '../../../shared/schemas/account.ts'
 import type { NewRoom, RemovedRoom, Room, RoomPatch } from '../../../shared/schemas/room.ts'
 import type { Clock } from '../../config/clock.ts'
@@ -10,7 +10,6 @@ import { conflict, invalid, notFound, stale } from '../../errors/AppError.ts'
 import type { EstimateKeeper } from '../estimates/estimateKeeper.ts'
 import { findWorkingEstimate } from '../estimates/estimateRepository.ts'
 import { removeLinesOfRoom, restoreLinesOfRoom } from '../estimates/lineRepository.ts'
-import { roomInput } from '../estimates/lineInput.ts'
 import { openHouse } from '../houses/houseAccess.ts'
 import { checkOrder } from './checkOrder.ts'
 import { placeRoom } from './placeRoom.ts'
@@ -42,7 +41,7 @@ export function createRoomService({ db, clock, keeper }: { db: Database; clock: 
         const position = placeRoom(tx, houseId, afterRoomId ?? null)
         const room: Room = { ...fields, id: newId(), houseId, position, version: 1 }
         repository.insertRoom(tx, room, clock().toISOString())
-        refresh(tx, houseId, (live) => live.addRoom(roomInput(room)))
+        refresh(tx, houseId, (live) => live.addRoom(toRoomInput(room)))
         audit(tx, user, room.id, 'add', null, room)
         return room
       })
@@ -56,7 +55,7 @@ export function createRoomService({ db, clock, keeper }: { db: Database; clock: 
         if (before.version !== ifMatch) throw stale(before)
         const after: Room = { ...before, ...patch, version: before.version + 1 }
         repository.updateRoom(tx, after, clock().toISOString())
-        refresh(tx, houseId, (live) => live.setRoom(roomId, roomInput(after)))
+        refresh(tx, houseId, (live) => live.setRoom(roomId, toRoomInput(after)))
         audit(tx, user, roomId, 'update', before, after)
         return after
       })

@@ -1,5 +1,6 @@
 import type { EstimateWhole, Line } from '../../schemas/estimate.ts'
-import type { EstimateInput, LineInput } from '../estimateInput.ts'
+import type { Room } from '../../schemas/room.ts'
+import type { EstimateInput, LineInput, RoomInput } from '../estimateInput.ts'
 import { effectivePrice } from '../pricing/effectivePrice.ts'
 
 /** The app's records as the engine computes them; ids are the keys. */
@@ -7,21 +8,19 @@ export function toEstimateInput({ house, rooms, lines, estimate }: EstimateWhole
   const { storeys, footprint, wallHeightIn, overhangIn, roof } = house
   return {
     house: { storeys, footprint, wallHeightIn, overhangIn, roof },
-    rooms: rooms.map(({ id, name, use, shape, ceiling, openings, deductions }) => ({
-      key: id,
-      name,
-      use,
-      shape,
-      ceiling,
-      openings,
-      deductions,
-    })),
+    rooms: rooms.map(toRoomInput),
     lines: lines.map(toLineInput),
     settings: estimate.settings,
   }
 }
 
-function toLineInput(line: Line): LineInput {
+/** A room's record as the engine computes it. */
+export function toRoomInput({ id, name, use, shape, ceiling, openings, deductions }: Room): RoomInput {
+  return { key: id, name, use, shape, ceiling, openings, deductions }
+}
+
+/** A line's record as the engine computes it, at the price that counts. */
+export function toLineInput(line: Line): LineInput {
   const { id, roomId, system, trade, unit, quantity, wastePercent, packageSize, basis, minimumChargeCents, hoursPerUnit, evidence } = line
   return {
     key: id,
