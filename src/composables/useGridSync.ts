@@ -1,4 +1,4 @@
-import type { GridApi } from 'ag-grid-community'
+import type { GridApi, IRowNode } from 'ag-grid-community'
 import { onScopeDispose } from 'vue'
 import type { GridRow } from './estimateRows.ts'
 import type { EstimateRows, RowsNews } from './useEstimateRows.ts'
@@ -17,7 +17,8 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
   }
 
   function reorder(grid: GridApi<GridRow>): void {
-    const focused = grid.getFocusedCell()
+    // The grid gives undefined, whatever its type says, while no cell has the focus.
+    const focused = grid.getFocusedCell() ?? null
     const key = focused === null ? undefined : grid.getDisplayedRowAtIndex(focused.rowIndex)?.data?.key
     // The grid compares by row id: lines that stay keep their row, and 5,000 of them cost a few milliseconds.
     grid.setGridOption('rowData', rows.rows.value as GridRow[])
@@ -26,11 +27,26 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
     if (now !== null && now !== focused.rowIndex) grid.setFocusedCell(now, focused.column)
   }
 
+  /** A cell that is being edited would begin anew. */
+  function otherColumns(grid: GridApi<GridRow>, editedColumn: string): string[] {
+    return grid.getAllDisplayedColumns().flatMap((column) => (column.getColId() === editedColumn ? [] : [column.getColId()]))
+  }
+
+  function refresh(grid: GridApi<GridRow>, rowNodes: IRowNode<GridRow>[], columns?: string[]): void {
+    if (rowNodes.length > 0) grid.refreshCells({ rowNodes, force: true, suppressFlash: true, ...(columns ? { columns } : {}) })
+  }
+
   function redraw(grid: GridApi<GridRow>, changed: readonly GridRow[]): void {
     const isMany = changed.length > 100
     const rowNodes = isMany ? grid.getRenderedNodes() : changed.flatMap(({ key }) => grid.getRowNode(key) ?? [])
     const lineNodes = rowNodes.filter(({ data }) => data?.kind === 'line')
-    if (lineNodes.length > 0) grid.refreshCells({ rowNodes: lineNodes, force: true, suppressFlash: true })
+    const [edited] = grid.getEditingCells()
+    const isEdited = (node: IRowNode<GridRow>) => edited !== undefined && node.rowIndex === edited.rowIndex
+    refresh(
+      grid,
+      lineNodes.filter((node) => !isEdited(node)),
+    )
+    if (edited) refresh(grid, lineNodes.filter(isEdited), otherColumns(grid, edited.colId))
     for (const node of rowNodes) if (node.data && node.data.kind !== 'line') node.setData(node.data)
   }
 }
