@@ -41,7 +41,7 @@ import { sameOrigin } from './middleware/sameOrigin.ts'
 import { securityHeaders } from './middleware/securityHeaders.ts'
 import { serveClient } from './middleware/serveClient.ts'
 import { session } from './middleware/session.ts'
-import { startWorkbookThread } from './workers/workbookThread.ts'
+import type { MakeWorkbook } from './workers/workbookThread.ts'
 
 const MINUTE_MS = 60_000
 
@@ -50,6 +50,7 @@ export interface AppParts {
   clock: Clock
   mail: MailSender
   hasher: PasswordHasher
+  makeWorkbook: MakeWorkbook
   config: AppConfig
   logger: Logger
 }
@@ -70,7 +71,7 @@ export function buildApp(parts: AppParts): BuiltApp {
   const accountLimit = limitByAddress({ limit: config.limits.accountsPerQuarterHour, windowMs: 15 * MINUTE_MS })
   events.filterBy(mayHearOfChange(db))
   const domain = createDomainServices({ db, clock, events })
-  const workbooks = createWorkbookService({ ...parts, ...domain, ...startWorkbookThread() })
+  const workbooks = createWorkbookService({ ...parts, ...domain })
   const services = { ...parts, ...domain, events, sessions, accounts, accountLimit, workbooks }
 
   const described = [

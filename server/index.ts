@@ -20,6 +20,7 @@ import { stopGracefully } from './http/stopGracefully.ts'
 import { createOutboxMailSender, createSmtpMailSender } from './mail/createMailSender.ts'
 import type { MailSender } from './mail/mailSender.ts'
 import { startHashingThread } from './workers/hashingThread.ts'
+import { startWorkbookThread } from './workers/workbookThread.ts'
 
 const CLIENT_FOLDER = fileURLToPath(new URL('../dist', import.meta.url))
 
@@ -37,11 +38,13 @@ async function start(env: Env): Promise<void> {
   if (!env.isProduction && !hasPeople(db)) await seed(db)
   const demoAccounts = await demoAccountsOf(db, env)
   const hasher = startHashingThread(PASSWORD_COST)
+  const workbookThread = startWorkbookThread()
   const { app, events } = buildApp({
     db,
     clock: systemClock,
     mail: mailOf(env, db),
     hasher,
+    makeWorkbook: workbookThread.makeWorkbook,
     config: { ...env, sessionSecret, hasOutbox: env.smtpUrl === null, checkAnswers: false, clientFolder: CLIENT_FOLDER, demoAccounts },
     logger: pino({ level: env.logLevel }),
   })
@@ -49,7 +52,7 @@ async function start(env: Env): Promise<void> {
   const server = await listen(app, env)
   stopOnSignal(async () => {
     await stopGracefully(server, () => events.closeAll())
-    await hasher.stop()
+    await Promise.all([hasher.stop(), workbookThread.stop()])
     closeDatabase(db)
   })
   process.stdout.write(welcomeText({ url: env.appUrl, demoAccounts, hasPeople: hasPeople(db) }))

@@ -69,12 +69,14 @@ describe('a translated formula', () => {
   const ofHouse = houseMeasures(buildHouse(), rooms)
   const houseValues = Float64Array.from(HOUSE_MEASURES, ({ name }) => (ofHouse[name]?.ok ? ofHouse[name].value : NaN))
   const names = [
-    ...rooms.flatMap((room, index) => Object.entries(roomMeasures(room)).map(([name, value]) => [roomMeasureName(index + 1, name), value] as const)),
+    ...rooms.flatMap((room, index) =>
+      Object.entries(roomMeasures(room)).map(([name, value]) => [roomMeasureName(index + 1, name), value] as const),
+    ),
     ...Object.entries(ofHouse).map(([name, value]) => [houseMeasureName(name), value] as const),
   ]
   const sheet = HyperFormula.buildFromArray(
     [[null]],
-    { licenseKey: 'gpl-v3' },
+    { licenseKey: 'gpl-v3', smartRounding: false },
     names.flatMap(([name, measure]) => (measure.ok ? [{ name, expression: measure.value }] : [])),
   )
   afterAll(() => sheet.destroy())
@@ -96,7 +98,9 @@ describe('a translated formula', () => {
     node: fc.oneof(
       { depthSize: 'small', withCrossShrink: true },
       leaf,
-      fc.tuple(tie('node'), fc.constantFrom('+', '-', '*', '/'), tie('node')).map(([left, operator, right]) => `(${left} ${operator} ${right})`),
+      fc
+        .tuple(tie('node'), fc.constantFrom('+', '-', '*', '/'), tie('node'))
+        .map(([left, operator, right]) => `(${left} ${operator} ${right})`),
       tie('node').map((argument) => `(-${argument})`),
       fc.tuple(tie('node'), fc.constantFrom('2', '-1', '3')).map(([base, exponent]) => `(${base}^${exponent})`),
       fc.tuple(fc.constantFrom('ceil', 'floor', 'round', 'abs'), tie('node')).map(([name, argument]) => `${name}(${argument})`),

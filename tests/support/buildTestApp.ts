@@ -4,6 +4,7 @@ import { buildApp, type AppParts } from '../../server/app.ts'
 import type { AppConfig } from '../../server/config/appConfig.ts'
 import { migrate } from '../../server/db/migrate.ts'
 import { openDatabase } from '../../server/db/openDatabase.ts'
+import { startWorkbookThread } from '../../server/workers/workbookThread.ts'
 import { createPasswordHasherHere } from '../../server/features/accounts/passwordHasher.ts'
 import { createSessionService } from '../../server/features/accounts/sessionService.ts'
 import type { MailMessage } from '../../server/mail/mailSender.ts'
@@ -25,6 +26,8 @@ const TEST_CONFIG: AppConfig = {
 
 /** The least cost that bcrypt takes: the tests are about what happens around a hash. */
 const hasher = createPasswordHasherHere(4)
+/** Starts with the first workbook that a test asks for. */
+const { makeWorkbook } = startWorkbookThread()
 
 export type TestApp = ReturnType<typeof buildTestApp>
 export type SignedIn = { user: TestUser; agent: ReturnType<typeof request.agent> }
@@ -44,7 +47,16 @@ export function buildTestApp(overrides: Partial<AppConfig> = {}, otherParts: Par
     },
   }
   const config = { ...TEST_CONFIG, ...overrides }
-  const { app, operations, events } = buildApp({ db, clock, mail, hasher, config, logger: pino({ level: 'silent' }), ...otherParts })
+  const { app, operations, events } = buildApp({
+    db,
+    clock,
+    mail,
+    hasher,
+    makeWorkbook,
+    config,
+    logger: pino({ level: 'silent' }),
+    ...otherParts,
+  })
   const sessions = createSessionService({ db, clock, onEnd: (end) => events.endSession(end) })
 
   /** The cookie of a new session of this person. */

@@ -89,7 +89,14 @@ export function buildWhole({
   unknowns?: unknown[]
   inspections?: unknown[]
 } = {}): EstimateWhole {
-  const totals = { directCents: ZERO, overheadAndProfitCents: ZERO, salesTaxCents: ZERO, permitsCents: ZERO, contingencyCents: ZERO, totalCents: ZERO }
+  const totals = {
+    directCents: ZERO,
+    overheadAndProfitCents: ZERO,
+    salesTaxCents: ZERO,
+    permitsCents: ZERO,
+    contingencyCents: ZERO,
+    totalCents: ZERO,
+  }
   return {
     estimate: {
       id: 'estimate-1',

@@ -44,7 +44,11 @@ export function expectAgreement(workbook: RecalculatedWorkbook, whole: EstimateW
     const row = layout.rowOf(index + 1)
     for (const end of ENDS) {
       const amount = centsOf(workbook.value('Estimate', cellAddress(row, AMOUNT_COLUMNS[end])))
-      expect({ line: index + 1, description, [end]: amount }).toEqual({ line: index + 1, description, [end]: figures.get(id)?.amountCents[end] })
+      expect({ line: index + 1, description, [end]: amount }).toEqual({
+        line: index + 1,
+        description,
+        [end]: figures.get(id)?.amountCents[end],
+      })
     }
   })
 }
@@ -57,7 +61,7 @@ export function expectResultsStand(workbook: RecalculatedWorkbook): void {
       const place = `${sheet}!${address}: ${workbook.formula(sheet, address)}`
       if (typeof kept === 'number') {
         expect(typeof now, place).toBe('number')
-        expect(Number(now), place).toBeCloseTo(kept, 7)
+        expect(Math.abs(Number(now) - kept), place).toBeLessThan(1e-9 * Math.max(1, Math.abs(kept)))
       } else expect(now ?? '', place).toBe(kept ?? '')
     }
   }

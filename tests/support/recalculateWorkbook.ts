@@ -30,7 +30,8 @@ export async function recalculateWorkbook(bytes: Buffer): Promise<RecalculatedWo
   const names = namesOf(file)
   const engine = HyperFormula.buildFromSheets(
     sheets,
-    { licenseKey: 'gpl-v3', useArrayArithmetic: false },
+    // Binary numbers as they come: the formulas must not need a program that tidies them up.
+    { licenseKey: 'gpl-v3', smartRounding: false },
     [...names].map(([name, reference]) => ({ name, expression: `=${reference}` })),
   )
   const places = new Map([...names].map(([name, reference]) => [name, placeOf(reference)]))
@@ -56,7 +57,7 @@ export async function recalculateWorkbook(bytes: Buffer): Promise<RecalculatedWo
     named: (name) => engine.getCellValue(addressOf(place(name).sheet, place(name).address)),
     value: (sheet, address) => engine.getCellValue(addressOf(sheet, address)),
     formula: (sheet, address) => cellOf(sheet, address).formula,
-    cached: (sheet, address) => cellOf(sheet, address).result ?? cellOf(sheet, address).value,
+    cached: (sheet, address) => (cellOf(sheet, address).formula ? (cellOf(sheet, address).result ?? '') : cellOf(sheet, address).value),
     set: (sheet, address, content) => void engine.setCellContents(addressOf(sheet, address), content),
     setNamed: (name, content) => void engine.setCellContents(addressOf(place(name).sheet, place(name).address), content),
     place,

@@ -36,6 +36,8 @@ const LETTERS_PER_DIGIT = 1.3
 const BOLD_LETTERS_PER_DIGIT = 1.05
 const LINE_PER_POINT = 1.28
 const PADDING_POINTS = 2.2
+/** The highest row there is ("Excel specifications and limits"). */
+const ROW_MAX_POINTS = 409
 
 /**
  * Height of a row that shows all of its text, in points. Reckoned here because programs differ on whether a row without a height grows with its text.
@@ -56,7 +58,8 @@ export function rowHeight(
       wraps && typeof value === 'string' ? linesOf(value, widthOf(row, index + 1, columns, merges) * lettersPerDigit(cell.style)) : 1
     return lines * points * LINE_PER_POINT + PADDING_POINTS
   })
-  return Math.round(Math.max(BODY_POINTS * LINE_PER_POINT + PADDING_POINTS, ...heights) * 100) / 100
+  const needed = Math.max(BODY_POINTS * LINE_PER_POINT + PADDING_POINTS, ...heights)
+  return Math.min(ROW_MAX_POINTS, Math.round(needed * 100) / 100)
 }
 
 function lettersPerDigit(style: StyleName): number {

@@ -1,7 +1,6 @@
 import type { EstimateWhole } from '../../schemas/estimate.ts'
 import type { EstimateResults } from '../../schemas/results.ts'
 import type { EstimateLayout } from './estimateLayout.ts'
-import { endsText } from './settingsWords.ts'
 import { setBreakdowns } from './summaryBreakdowns.ts'
 import { SUMMARY_COLUMN, SUMMARY_WIDTHS } from './summaryColumns.ts'
 import { setFacts } from './summaryFacts.ts'
@@ -32,7 +31,7 @@ export function summarySheet(parts: SummaryParts): { sheet: WorkbookSheet; names
   draft.set(2, 1, text(whole.house.name, 'title'))
   draft.set(3, 1, text(whole.house.address, 'subtitle'))
   const rangeRow = setFacts(draft, 5, parts) + 2
-  setRange(draft, rangeRow, results, whole)
+  setRange(draft, rangeRow, results)
   const totalsEnd = setTotals(draft, rangeRow + 5, parts)
   const end = setBreakdowns(draft, totalsEnd + 2, parts)
   draft.set(end + 1, 1, text('Assumptions and cautions stand on the last sheet.', 'small'))
@@ -44,7 +43,7 @@ export function summarySheet(parts: SummaryParts): { sheet: WorkbookSheet; names
   return { sheet, names: draft.names }
 }
 
-function setRange(draft: SheetDraft, row: number, { totals }: EstimateResults, { estimate }: EstimateWhole): void {
+function setRange(draft: SheetDraft, row: number, { totals }: EstimateResults): void {
   const { label, low } = SUMMARY_COLUMN
   draft.setRow(row, label, [text('What the work comes to', 'heading'), text('', 'heading'), text('', 'heading')])
   draft.setRow(row, low, [
@@ -69,5 +68,9 @@ function setRange(draft: SheetDraft, row: number, { totals }: EstimateResults, {
       'ribbon',
     ),
   )
-  draft.set(row + 3, label, text(`The ribbon starts at $0. ${endsText(estimate.settings.ends)}`, 'small'))
+  draft.set(
+    row + 3,
+    label,
+    text('The ribbon starts at $0. A total adds up the lows and the highs of all lines, so most jobs end well inside it.', 'small'),
+  )
 }
