@@ -5,6 +5,7 @@ type Bench = () => AsyncIterable<BenchFigure> | Iterable<BenchFigure> | Promise<
 /** The benches, a file each. They run one after the other, so that none is in another's way. */
 const BENCHES: Record<string, () => Promise<Bench>> = {
   engine: async () => (await import('./engine.ts')).engineBench,
+  workbook: async () => (await import('./workbook.ts')).workbookBench,
 }
 
 /** `npm run bench` prints all figures, one JSON line each; `npm run bench -- engine` those of the benches that are named. */
