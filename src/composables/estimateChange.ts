@@ -1,4 +1,5 @@
 import type { EstimateSettings, Line, LineFields } from '../../shared/schemas/estimate.ts'
+import type { LineField, WrongEntry } from './lineRow.ts'
 
 /** What one line was and becomes, field by field. Lines go by the key that they have on this page (`LineRow.key`). */
 export interface LineEdit {
@@ -15,9 +16,18 @@ export interface PlacedLine {
   book: Line['book']
 }
 
+/** What was keyed into a cell and couldn't be taken, before and after a step. */
+export interface CellMark {
+  key: string
+  field: LineField
+  before: WrongEntry | null
+  after: WrongEntry | null
+}
+
 /** Everything that a person can do to an estimate, as data that can be turned round. */
 export type EstimateChange =
   | { kind: 'edit'; edits: readonly LineEdit[] }
+  | { kind: 'mark'; marks: readonly CellMark[] }
   | { kind: 'add'; lines: readonly PlacedLine[] }
   | { kind: 'remove'; lines: readonly PlacedLine[] }
   | { kind: 'order'; before: readonly string[]; after: readonly string[] }
@@ -35,6 +45,8 @@ export function invertChange(change: EstimateChange): EstimateChange {
   switch (change.kind) {
     case 'edit':
       return { kind: 'edit', edits: change.edits.map(({ key, before, after }) => ({ key, before: after, after: before })).reverse() }
+    case 'mark':
+      return { kind: 'mark', marks: change.marks.map(({ key, field, before, after }) => ({ key, field, before: after, after: before })) }
     case 'add':
       return { kind: 'remove', lines: change.lines }
     case 'remove':

@@ -92,7 +92,8 @@ export function createEstimateModel(whole: EstimateWhole, { calls, onBehind }: M
 
   function apply(command: EstimateCommand): void {
     const touched = command.changes.flatMap(applyChange)
-    const isStructural = command.changes.some(({ kind }) => kind !== 'edit' && kind !== 'settings') || command.changes.some(isRegrouping)
+    const isStructural =
+      command.changes.some(({ kind }) => kind === 'add' || kind === 'remove' || kind === 'order') || command.changes.some(isRegrouping)
     tell({ rows: touched.filter(({ isRemoved }) => !isRemoved), isStructural })
     saver.want(touched)
   }
@@ -213,13 +214,6 @@ export function createEstimateModel(whole: EstimateWhole, { calls, onBehind }: M
       saver.want([])
     },
     settleGone,
-    /** Marks what was keyed into a cell and can't be taken; `null` takes the mark away. */
-    setWrong(key: string, field: LineField, entry: { text: string; words: string } | null): void {
-      const row = list.find(key)
-      if (!row) return
-      changes.setWrong(row, field, entry)
-      tell({ rows: [row], isStructural: false })
-    },
     /** Says which line somebody is typing in, so that it isn't taken from under the cursor. */
     setEdited(key: string | null): void {
       editedKey = key

@@ -17,6 +17,7 @@ export type GridIntent =
         | 'help'
         | 'escape'
     }
+  | { kind: 'go'; to: 'row-start' | 'row-end' | 'first' | 'last' }
   | { kind: 'move'; step: -1 | 1 }
   | { kind: 'extend'; rows: number; across: number }
   | { kind: 'tab'; isBack: boolean }
@@ -62,6 +63,10 @@ export function commandIntent({ key, shiftKey }: Key): GridIntent | null {
       return { kind: 'fill-down' }
     case 'a':
       return { kind: 'select-all' }
+    case 'home':
+      return { kind: 'go', to: 'first' }
+    case 'end':
+      return { kind: 'go', to: 'last' }
     case 'enter':
       return { kind: 'add-line' }
     case 'delete':
@@ -82,6 +87,10 @@ function plainIntent({ key, shiftKey }: Key): GridIntent | null {
     case 'Delete':
     case 'Backspace':
       return { kind: 'clear' }
+    case 'Home':
+      return { kind: 'go', to: 'row-start' }
+    case 'End':
+      return { kind: 'go', to: 'row-end' }
     case 'Escape':
       return { kind: 'escape' }
     case 'Tab':

@@ -16,6 +16,12 @@ export function createLineChanges({ list, removed, figures }: LineChangesOptions
     switch (change.kind) {
       case 'edit':
         return change.edits.flatMap((edit) => applyEdit(edit))
+      case 'mark':
+        return change.marks.flatMap(({ key, field, after }) => {
+          const row = list.find(key)
+          if (row) setWrong(row, field, after)
+          return row ?? []
+        })
       case 'add':
         return change.lines.map((line) => bringIn(line))
       case 'remove':
@@ -70,5 +76,5 @@ export function createLineChanges({ list, removed, figures }: LineChangesOptions
     figures.set(row)
   }
 
-  return { apply, drop, setWrong, setAtOdds }
+  return { apply, drop, setAtOdds }
 }

@@ -9,6 +9,7 @@ import type { PastePlan } from './pastePlan.ts'
 import { useEstimateEdits } from './useEstimateEdits.ts'
 import { useEstimateRows } from './useEstimateRows.ts'
 import { useEstimateTotals } from './useEstimateTotals.ts'
+import { useNotice } from './useNotice.ts'
 import { usePermissions } from './usePermissions.ts'
 import { useUndoToast } from './useUndoToast.ts'
 
@@ -40,6 +41,7 @@ export function useEstimateDesk(model: EstimateModel) {
   const isReadOnly = !may('estimate.write')
   const toasts = useUndoToast()
   const panel = shallowRef<DeskPanel | null>(null)
+  const notice = useNotice()
   const focusedKey = shallowRef<string | null>(null)
 
   const { priceBookVersion, regionKey } = model.estimate.value
@@ -79,12 +81,12 @@ export function useEstimateDesk(model: EstimateModel) {
 
   function undo(): void {
     const command = edits.history.undo()
-    toasts.say(command ? `Undone: ${command.words}` : 'There is nothing to undo.')
+    notice.say(command ? `Undone: ${command.words}.` : 'There is nothing to undo.')
   }
 
   function redo(): void {
     const command = edits.history.redo()
-    toasts.say(command ? `Done again: ${command.words}` : 'There is nothing to do again.')
+    notice.say(command ? `Done again: ${command.words}.` : 'There is nothing to do again.')
   }
 
   return {
@@ -94,6 +96,8 @@ export function useEstimateDesk(model: EstimateModel) {
     rows,
     totals,
     toasts,
+    notice: notice.text,
+    say: notice.say,
     panel,
     focusedKey,
     focusedLine,

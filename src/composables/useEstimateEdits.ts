@@ -3,7 +3,7 @@ import type { EstimateSettings, Line, LineFields } from '../../shared/schemas/es
 import type { PriceItem } from '../../shared/schemas/priceItem.ts'
 import type { EstimateCommand, LineEdit, PlacedLine } from './estimateChange.ts'
 import type { EstimateModel } from './estimateModel.ts'
-import type { LineField } from './lineRow.ts'
+import type { LineField, WrongEntry } from './lineRow.ts'
 import { isSame } from './mergeFields.ts'
 import { moveLines } from './moveLines.ts'
 import { useLineHistory } from './useLineHistory.ts'
@@ -35,7 +35,9 @@ export function useEstimateEdits({ model, findItem }: EditsOptions) {
     const row = model.list.find(key)
     if (!row) return []
     const full = withItsQuantity(row.fields, after)
-    const names = (Object.keys(full) as LineField[]).filter((name) => !isSame(full[name], row.fields[name]))
+    const names = (Object.keys(full) as LineField[]).filter(
+      (name) => row.wrong[name] !== undefined || !isSame(full[name], row.fields[name]),
+    )
     if (names.length === 0) return []
     const pick = (fields: Partial<LineFields>) => Object.fromEntries(names.map((name) => [name, fields[name]]))
     return [{ key, before: pick(row.fields), after: pick(full) }]
@@ -50,16 +52,27 @@ export function useEstimateEdits({ model, findItem }: EditsOptions) {
     return fields.quantity === suggested(fields.roomId) ? { ...after, quantity: suggested(after.roomId ?? null) } : after
   }
 
-  /** Adds lines one below the other, below `afterKey` (`null`: at the end). Answers with their keys. */
-  function add(lines: readonly LineToAdd[], afterKey: string | null, words: string, before: readonly LineEdit[] = []): string[] {
+  /** Lines with keys and places of their own, one below the other, below `afterKey` (`null`: at the end). */
+  function place(lines: readonly LineToAdd[], afterKey: string | null): PlacedLine[] {
     let above = afterKey ?? model.list.rows().at(-1)?.key ?? null
-    const placed: PlacedLine[] = lines.map(({ fields, book }) => {
+    return lines.map(({ fields, book }) => {
       const line = { key: `new-${newIdempotencyKey()}`, afterKey: above, fields, book }
       above = line.key
       return line
     })
-    run({ words, changes: [...(before.length > 0 ? [{ kind: 'edit' as const, edits: before }] : []), { kind: 'add', lines: placed }] })
+  }
+
+  /** Adds lines below another. Answers with their keys. */
+  function add(lines: readonly LineToAdd[], afterKey: string | null, words: string): string[] {
+    const placed = place(lines, afterKey)
+    run({ words, changes: [{ kind: 'add', lines: placed }] })
     return placed.map(({ key }) => key)
+  }
+
+  /** Marks what was keyed into a cell and can't be taken. */
+  function mark(key: string, field: LineField, after: WrongEntry): void {
+    const before = model.list.find(key)?.wrong[field] ?? null
+    run({ words: 'entry that couldn’t be taken', changes: [{ kind: 'mark', marks: [{ key, field, before, after }] }] })
   }
 
   function remove(keys: readonly string[], words: string): EstimateCommand | null {
@@ -91,7 +104,7 @@ export function useEstimateEdits({ model, findItem }: EditsOptions) {
     return command
   }
 
-  return { edit, add, remove, move, changeSettings, history }
+  return { edit, place, add, mark, remove, move, changeSettings, run, history }
 }
 
 export type EstimateEdits = ReturnType<typeof useEstimateEdits>

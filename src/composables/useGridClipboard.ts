@@ -1,4 +1,4 @@
-import type { EstimateCommand } from './estimateChange.ts'
+import type { CellMark, EstimateChange } from './estimateChange.ts'
 import { CELL_COLUMNS, type CellColumn } from './lineCells.ts'
 import { clipLines, readClip } from './lineClip.ts'
 import type { LineRow } from './lineRow.ts'
@@ -20,7 +20,7 @@ export interface ClipboardPlace {
 
 /** Copy, cut and paste of lines and cells, with other programs as with this one. */
 export function useGridClipboard(desk: EstimateDesk, clear: (rows: readonly LineRow[], columns: readonly CellColumn[]) => void) {
-  const { model, edits, rows, toasts } = desk
+  const { model, edits, rows, say } = desk
 
   /** Puts the selection, or the focused cell, on the clipboard. Answers whether there was something. */
   function copy(data: DataTransfer, place: ClipboardPlace): boolean {
@@ -60,7 +60,7 @@ export function useGridClipboard(desk: EstimateDesk, clear: (rows: readonly Line
   /** Lines copied here come back as lines of their own, below the focused one. */
   function pasteLines(lines: Parameters<typeof edits.add>[0], { focused }: ClipboardPlace): void {
     edits.add(lines, focused?.row.key ?? null, `paste of ${counted(lines.length)}`)
-    toasts.say(`${counted(lines.length)} pasted`)
+    say(`${counted(lines.length)} pasted.`)
   }
 
   function planOf(cells: string[][], place: ClipboardPlace): PastePlan | null {
@@ -77,24 +77,31 @@ export function useGridClipboard(desk: EstimateDesk, clear: (rows: readonly Line
     return planPaste({ cells: block, rows: target, columns, rooms: model.rooms.value, findItem: desk.findItemByName, last: shown.at(-1) })
   }
 
+  /** The whole paste as one step. */
   function carryOut(plan: PastePlan): void {
-    const added = plan.added.length > 0 ? edits.add(plan.added, rows.shownLines().at(-1)?.key ?? null, words(plan), plan.edits) : []
-    if (plan.added.length === 0) runEdits(plan)
-    for (const { at, field, text, words: why } of plan.wrong) {
-      const key = typeof at === 'number' ? added[at] : at
-      if (key !== undefined) model.setWrong(key, field, { text, words: why })
-    }
+    const placed = edits.place(plan.added, rows.shownLines().at(-1)?.key ?? null)
+    const marks = plan.wrong.flatMap(({ at, field, text, words: why }): CellMark[] => {
+      const key = typeof at === 'number' ? placed[at]?.key : at
+      const before = key === undefined ? undefined : model.list.find(key)?.wrong[field]
+      return key === undefined ? [] : [{ key, field, before: before ?? null, after: { text, words: why } }]
+    })
+    const changes: EstimateChange[] = [
+      { kind: 'edit', edits: plan.edits },
+      { kind: 'add', lines: placed },
+      { kind: 'mark', marks },
+    ]
+    edits.run({ words: words(plan), changes: changes.filter(isSomething) })
     const wrongWords = plan.wrong.length === 0 ? '' : `; ${plan.wrong.length} cells couldn’t be taken and are marked`
-    if (plan.rowCount > 1 || plan.wrong.length > 0) toasts.say(`${counted(plan.rowCount)} pasted${wrongWords}`)
-  }
-
-  function runEdits(plan: PastePlan): void {
-    if (plan.edits.length === 0) return
-    const command: EstimateCommand = { words: words(plan), changes: [{ kind: 'edit', edits: plan.edits }] }
-    edits.history.run(command)
+    if (plan.rowCount > 1 || plan.wrong.length > 0) say(`${counted(plan.rowCount)} pasted${wrongWords}.`)
   }
 
   return { copy, cut, paste }
+}
+
+function isSomething(change: EstimateChange): boolean {
+  if (change.kind === 'edit') return change.edits.length > 0
+  if (change.kind === 'mark') return change.marks.length > 0
+  return change.kind !== 'add' || change.lines.length > 0
 }
 
 function words(plan: PastePlan): string {

@@ -17,7 +17,7 @@ const COLUMN_WORDS: Partial<Record<CellColumn, string>> = {
 }
 
 /** What becomes of what is keyed into a cell: kept, marked as wrong, or held against what somebody else made of the field meanwhile. */
-export function useGridEditing({ model, edits, toasts }: EstimateDesk) {
+export function useGridEditing({ model, edits, say }: EstimateDesk) {
   let started: { key: string; field: LineField; value: unknown } | null = null
 
   function onStarted({ data, column }: CellEditingStartedEvent<GridRow>): void {
@@ -56,7 +56,7 @@ export function useGridEditing({ model, edits, toasts }: EstimateDesk) {
     const isCleared = text.trim() === ''
     if (column === 'quantity') return readOrMark(row, column, keptQuantity(text) || '0')
     if (column === 'description' && isCleared) {
-      toasts.say('A line needs a description. Ctrl+Delete removes the line.')
+      say('A line needs a description. Ctrl+Delete removes the line.')
       return null
     }
     return readOrMark(row, column, text)
@@ -65,11 +65,8 @@ export function useGridEditing({ model, edits, toasts }: EstimateDesk) {
   function readOrMark(row: LineRow, column: CellColumn, text: string): Partial<LineFields> | null {
     const field = FIELD_OF_COLUMN[column]
     const read = readCell(row, column, text, model.rooms.value)
-    if (read.ok) {
-      if (field !== null && row.wrong[field]) model.setWrong(row.key, field, null)
-      return read.patch
-    }
-    if (field !== null) model.setWrong(row.key, field, { text, words: read.words })
+    if (read.ok) return read.patch
+    if (field !== null) edits.mark(row.key, field, { text, words: read.words })
     return null
   }
 
@@ -81,8 +78,7 @@ export function useGridEditing({ model, edits, toasts }: EstimateDesk) {
       return Object.keys(after).length === 0 ? [] : [{ key: row.key, after }]
     })
     const isDone = changes.length > 0 && edits.edit(changes, 'clearing of cells') !== null
-    if (!isDone && columns.length === 1 && columns[0] === 'description')
-      toasts.say('A line needs a description. Ctrl+Delete removes the line.')
+    if (!isDone && columns.length === 1 && columns[0] === 'description') say('A line needs a description. Ctrl+Delete removes the line.')
   }
 
   /** Fills the cells below from the topmost, as one step. */

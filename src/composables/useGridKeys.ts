@@ -41,7 +41,7 @@ export function useGridKeys({ desk, selection, editing, addBelow, command, leave
     const wasLeaving = isLeaving
     isLeaving = intent?.kind === 'escape'
     if (intent === null) {
-      if (!event.shiftKey && !event.ctrlKey && /^(Arrow|Page|Home|End)/.test(event.key)) selection.clear()
+      if (!event.shiftKey && !event.ctrlKey && /^(Arrow|Page)/.test(event.key)) selection.clear()
       return false
     }
     if (intent.kind === 'tab' && !wasLeaving) return false
@@ -88,6 +88,9 @@ export function useGridKeys({ desk, selection, editing, addBelow, command, leave
         if (corner) api.ensureIndexVisible(corner.rowIndex)
         return
       }
+      case 'go':
+        selection.clear()
+        return go(intent.to, focus, api)
       case 'select-all':
         return selection.selectRows(rows.shownLines().map(({ key }) => key))
       case 'select-row':
@@ -96,6 +99,15 @@ export function useGridKeys({ desk, selection, editing, addBelow, command, leave
       default:
         if (!isReadOnly) change(intent, focus)
     }
+  }
+
+  function go(to: 'row-start' | 'row-end' | 'first' | 'last', { rowIndex }: Focus, api: GridApi<GridRow>): void {
+    const columns = selection.columns()
+    const column = to === 'row-start' || to === 'first' ? columns[0] : columns.at(-1)
+    const row = to === 'first' ? 0 : to === 'last' ? api.getDisplayedRowCount() - 1 : rowIndex
+    if (column === undefined) return
+    api.ensureIndexVisible(row)
+    api.setFocusedCell(row, column)
   }
 
   function change(intent: GridIntent, { row, column }: Focus): void {
@@ -140,7 +152,7 @@ export function useGridKeys({ desk, selection, editing, addBelow, command, leave
     const group = rows.group(row).map(({ key }) => key)
     const inGroup = targets.map(({ key }) => key).filter((key) => group.includes(key))
     const isMoved = edits.move(inGroup, step, group)
-    if (!isMoved) desk.toasts.say(step === -1 ? 'It is the first of its group already.' : 'It is the last of its group already.')
+    if (!isMoved) desk.say(step === -1 ? 'It is the first of its group already.' : 'It is the last of its group already.')
   }
 
   /** A head folds and opens. */

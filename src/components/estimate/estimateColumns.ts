@@ -1,3 +1,4 @@
+import type { AppContext } from 'vue'
 import type { CellClassParams, ColDef, EditableCallbackParams, ValueGetterParams } from 'ag-grid-community'
 import { EVIDENCE_MARKS } from '../../../shared/schemas/estimate.ts'
 import { NAME_MAX, NOTE_MAX } from '../../../shared/schemas/common.ts'
@@ -15,6 +16,7 @@ import { BasisCell, NoteCell, RoomCell } from './cells/TextCell.ts'
 import ChoiceCellEditor, { type Choice } from './editors/ChoiceCellEditor.vue'
 import FormulaCellEditor from './editors/FormulaCellEditor.vue'
 import TextCellEditor from './editors/TextCellEditor.vue'
+import { vueCellEditor } from './editors/vueCellEditor.ts'
 import { COLUMN_TITLES } from './columnTitles.ts'
 import type { GridContext } from './gridContext.ts'
 import { columnOfError } from './lineProblem.ts'
@@ -25,12 +27,17 @@ const MARK_CHOICES: readonly Choice[] = EVIDENCE_MARKS.map((mark) => ({ value: m
 
 interface ColumnOptions {
   isReadOnly: boolean
+  /** What the editors stand in: stores, theme, routes. */
+  appContext: AppContext | null
   isSelected(key: string, column: string): boolean
   isFound(key: string): boolean
 }
 
 /** The columns of the estimate grid, left to right; the first two stay in view. */
-export function estimateColumns({ isReadOnly, isSelected, isFound }: ColumnOptions): Column[] {
+export function estimateColumns({ isReadOnly, appContext, isSelected, isFound }: ColumnOptions): Column[] {
+  const choiceEditor = vueCellEditor(ChoiceCellEditor, appContext)
+  const formulaEditor = vueCellEditor(FormulaCellEditor, appContext)
+  const textEditor = vueCellEditor(TextCellEditor, appContext)
   const isEditable = ({ data }: EditableCallbackParams<GridRow>) => !isReadOnly && data?.kind === 'line'
   const classRules = {
     'is-selected': ({ data, column }: CellClassParams<GridRow>) => data !== undefined && isSelected(data.key, column.getColId()),
@@ -54,35 +61,35 @@ export function estimateColumns({ isReadOnly, isSelected, isFound }: ColumnOptio
       headerTooltip: 'How it is known',
       cellRenderer: MarkCell,
       editable: isEditable,
-      cellEditor: ChoiceCellEditor,
+      cellEditor: choiceEditor,
       cellEditorParams: { choices: () => MARK_CHOICES, label: 'How it is known' },
     }),
-    column('description', 226, {
+    column('description', 216, {
       pinned: 'left',
       lockPosition: 'left',
       cellRenderer: DescriptionCell,
       editable: isEditable,
-      cellEditor: TextCellEditor,
+      cellEditor: textEditor,
       cellEditorParams: { label: 'Description', maxLength: NAME_MAX },
     }),
     column('room', 112, {
       cellRenderer: RoomCell,
       editable: isEditable,
-      cellEditor: ChoiceCellEditor,
+      cellEditor: choiceEditor,
       cellEditorParams: ({ context }: { context: GridContext }) => ({ choices: () => roomChoices(context), label: 'Room' }),
     }),
-    column('quantity', 232, { cellRenderer: QuantityCell, editable: isEditable, cellEditor: FormulaCellEditor }),
-    column('basis', 84, { cellRenderer: BasisCell }),
-    column('price', 124, { cellRenderer: PriceCell, type: 'figure' }),
+    column('quantity', 236, { cellRenderer: QuantityCell, editable: isEditable, cellEditor: formulaEditor }),
+    column('basis', 90, { cellRenderer: BasisCell }),
+    column('price', 132, { cellRenderer: PriceCell, type: 'figure' }),
     column('amount', 104, { cellRenderer: AmountCell, type: 'figure' }),
     column('range', 104, { cellRenderer: RangeCell }),
     column('hours', 60, { cellRenderer: HoursCell, type: 'figure' }),
     column('note', 180, {
       flex: 1,
-      minWidth: 84,
+      minWidth: 80,
       cellRenderer: NoteCell,
       editable: isEditable,
-      cellEditor: TextCellEditor,
+      cellEditor: textEditor,
       cellEditorParams: { label: 'Note', maxLength: NOTE_MAX, isLong: true },
     }),
   ]

@@ -11,8 +11,11 @@ export interface WhyStep {
   isResult?: boolean
 }
 
+/** Where the book's price of a line is from, in words: `price book 1 for Merrow Valley`. */
+export type PriceSource = (kind: 'materials' | 'installed') => string
+
 /** The way from what was measured to the amount, in the order in which the engine takes it; steps that change nothing are left out. */
-export function whySteps({ fields, figures, book }: LineRow, regionName: string, priceBookVersion: number): WhyStep[] {
+export function whySteps({ fields, figures, book }: LineRow, sourceOf: PriceSource): WhyStep[] {
   const { measured, quantity, unitPriceE4, amountCents, hours } = figures
   const withWaste = measured * (1 + fields.wastePercent / 100)
   const isPackaged = fields.basis === 'own-hands' && fields.packageSize !== null
@@ -49,9 +52,7 @@ export function whySteps({ fields, figures, book }: LineRow, regionName: string,
 
   function priceSource(): string {
     if (fields.override !== null) return ownPriceSource(fields.override.reason)
-    const kind = fields.basis === 'own-hands' ? 'materials' : 'installed'
-    const place = regionName === '' ? '' : `, as ${regionName} pays`
-    return `price book ${priceBookVersion}, ${kind}${place}`
+    return sourceOf(fields.basis === 'own-hands' ? 'materials' : 'installed')
   }
 
   function ownPriceSource(reason: string): string {

@@ -109,12 +109,22 @@ describe('adding, removing, moving', () => {
     expect(row(keys[0] ?? '').id).toBe('added-1')
   })
 
-  it('undoes a paste of edits and additions as one step, and does it again with the same lines', async () => {
-    const before = [{ key: 'line-1', before: { quantity: '100' }, after: { quantity: '5' } }]
-    edits.add([own('First'), own('Second')], 'line-3', 'paste of 3 lines', before)
+  it('undoes a paste of edits, additions and marked cells as one step, and does it again with the same lines', async () => {
+    const lines = edits.place([own('First'), own('Second')], 'line-3')
+    const wrong = { text: 'Nowhere', words: '`Nowhere` is no room of this house.' }
+    edits.run({
+      words: 'paste of 3 lines',
+      changes: [
+        { kind: 'edit', edits: [{ key: 'line-1', before: { quantity: '100' }, after: { quantity: '5' } }] },
+        { kind: 'add', lines },
+        { kind: 'mark', marks: [{ key: 'line-2', field: 'roomId', before: null, after: wrong }] },
+      ],
+    })
+    expect(row('line-2').wrong.roomId).toEqual(wrong)
     await flushPromises()
     edits.history.undo()
     await flushPromises()
+    expect(row('line-2').wrong.roomId).toBeUndefined()
     expect(server.whole().lines.map(({ description, quantity }) => `${description} ${quantity}`)).toEqual([
       'Floor 100',
       'Wall 100',
@@ -124,6 +134,7 @@ describe('adding, removing, moving', () => {
     await flushPromises()
     expect(server.whole().lines.map(({ id }) => id)).toEqual(['line-1', 'line-2', 'line-3', 'added-1', 'added-2'])
     expect(server.line('line-1')?.quantity).toBe('5')
+    expect(row('line-2').wrong.roomId).toEqual(wrong)
   })
 
   it('never sends a line that was added and removed again before the server heard of it', async () => {

@@ -4,7 +4,7 @@ import { bookPrice } from '../../../composables/keyedPrice.ts'
 import { element, setText } from './element.ts'
 import { RowCell } from './RowCell.ts'
 
-/** The price that counts; where somebody set it, the book's own stands beside it. */
+/** The price that counts; where somebody set it, the book's own stands before it. */
 export class PriceCell extends RowCell {
   private readonly book = element('span', 'book-price')
   private readonly price = element('span', 'price')
@@ -29,8 +29,8 @@ export class PriceCell extends RowCell {
     const book = bookPrice(row)
     this.box.classList.toggle('is-own', override !== null)
     this.box.classList.toggle('has-error', price === null)
-    setText(this.book, override !== null && book !== null ? `book ${formatUnitPrice(book.likely)}` : '')
+    setText(this.book, override !== null && book !== null ? `${formatUnitPrice(book.likely)} →` : '')
     setText(this.price, price === null ? 'no price' : formatUnitPrice(price.likely))
-    this.box.title = row.wrong.override?.words ?? (override === null ? '' : `Own price: ${override.reason}`)
+    this.box.title = row.wrong.override?.words ?? (override === null ? '' : `Own price in place of the book’s: ${override.reason}`)
   }
 }
