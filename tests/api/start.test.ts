@@ -1,7 +1,7 @@
 import { existsSync, mkdtempSync, readdirSync, rmSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
-import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import { systemClock } from '../../server/config/clock.ts'
 import { openFirmFile } from '../../server/db/firmFile.ts'
 import { closeDatabase } from '../../server/db/openDatabase.ts'
@@ -10,6 +10,9 @@ import { saveFirm } from '../../server/features/firm/firmRepository.ts'
 import { auditOf } from '../support/auditOf.ts'
 import { runProgram } from '../support/runProgram.ts'
 import { startApp, type RunningApp } from '../support/startApp.ts'
+
+// Each starts whole processes, several a test; a busy machine takes its time.
+vi.setConfig({ testTimeout: 90_000, hookTimeout: 30_000 })
 
 let dataDir: string
 let env: Record<string, string>
