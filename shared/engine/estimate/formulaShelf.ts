@@ -67,7 +67,14 @@ export class FormulaShelf {
         dependsOnRooms: roomsMeasures.length > 0 || someNode(node, ({ kind: nodeKind }) => nodeKind === 'sum-rooms'),
       }
     } catch (thrown) {
-      return { evaluate: () => NaN, node: null, error: lineErrorOf(thrown), dimension: null, roomsMeasures: [], dependsOnRooms: false }
+      return {
+        evaluate: () => NaN,
+        node: null,
+        error: lineErrorOf(thrown, text),
+        dimension: null,
+        roomsMeasures: [],
+        dependsOnRooms: false,
+      }
     }
   }
 }

@@ -13,7 +13,7 @@ export function lineError(field: LineError['field'], code: string, message: stri
 }
 
 /** A formula's error is the quantity's; a unit that isn't known, the unit's. Anything else that was thrown is a bug and goes on. */
-export function lineErrorOf(thrown: unknown): LineError {
+export function lineErrorOf(thrown: unknown, text: string): LineError {
   if (!(thrown instanceof FormulaError)) throw thrown
-  return { field: thrown.code === 'unknown-unit' ? 'unit' : 'quantity', code: thrown.code, message: thrown.message, at: thrown.at }
+  return { field: thrown.code === 'unknown-unit' ? 'unit' : 'quantity', code: thrown.code, message: thrown.wordsFor(text), at: thrown.at }
 }

@@ -46,10 +46,11 @@ export class LineTable {
     const { columns } = this
     const row = columns.row[slot] as number
     const evaluate = this.evaluates[slot] as Evaluate
-    const measured = row === NO_ROW ? NaN : evaluate(row)
-    const isQuantity = measured >= NEARLY_ZERO && measured <= QUANTITY_MAX
+    const answer = row === NO_ROW ? NaN : evaluate(row)
+    const isQuantity = answer >= NEARLY_ZERO && answer <= QUANTITY_MAX
     if (!isQuantity) return this.fail(slot, explain(slot))
-    const hundredths = quantityHundredths(Math.max(measured, 0), columns.wasteHundred[slot] as number, columns.packageSize[slot] as number)
+    const measured = Math.max(answer, 0)
+    const hundredths = quantityHundredths(measured, columns.wasteHundred[slot] as number, columns.packageSize[slot] as number)
     columns.measured[slot] = measured
     columns.quantityHundredths[slot] = hundredths
     const highE4 = columns.highE4[slot] as number

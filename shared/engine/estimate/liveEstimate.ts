@@ -246,8 +246,7 @@ export class LiveEstimate {
     if (formula.error) return formula.error
     const whyNoMeasure = ({ scope, name }: Measure, at: number): string =>
       scope === 'house' ? this.house.whyNot(name) : whyNoRoomMeasure(this.rooms.roomAt(at), name)
-    return lineErrorOf(
-      explainFailure(formula.node, row, { columns: this.columns, whyNoMeasure, roomName: (at) => this.rooms.roomAt(at).name }),
-    )
+    const failure = explainFailure(formula.node, row, { columns: this.columns, whyNoMeasure, roomName: (at) => this.rooms.roomAt(at).name })
+    return lineErrorOf(failure, String(this.inputAt(slot).quantity))
   }
 }

@@ -21,7 +21,7 @@ export function checkFormula(text: string, { scope, unit }: { scope: 'room' | 'h
     checkUnit(kind, known, text)
     return { ok: true, dimension: kind.fits === 'any' ? 'any' : (dimensionOf(kind) ?? 'count') }
   } catch (error) {
-    if (error instanceof FormulaError) return { ok: false, code: error.code, message: error.message, at: error.at }
+    if (error instanceof FormulaError) return { ok: false, code: error.code, message: error.wordsFor(text), at: error.at }
     throw error
   }
 }

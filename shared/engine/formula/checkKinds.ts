@@ -1,5 +1,5 @@
 import type { Unit } from '../../catalogue/units.ts'
-import { FormulaError } from './formulaError.ts'
+import { FormulaError, PART } from './formulaError.ts'
 import { EXPONENT_MAX } from './formulaLimits.ts'
 import { kindWords, LITERAL, exactly, POWERS, TRUTH, type Kind, type Quantity } from './kinds.ts'
 import { over, times, together, toThePower } from './kindArithmetic.ts'
@@ -36,7 +36,7 @@ export function checkKinds(node: FormulaNode): Kind {
 export function quantityOf(node: FormulaNode): Quantity {
   const kind = checkKinds(node)
   if (kind.kind === 'quantity') return kind
-  throw new FormulaError('unit-mismatch', 'This gives yes or no, not a quantity. Write condition ? one : other.', node.at)
+  throw new FormulaError('unit-mismatch', `${PART} gives yes or no, not a quantity. Write condition ? one : other.`, node.at)
 }
 
 type Arithmetic = Extract<FormulaNode, { kind: 'arithmetic' }>
@@ -60,12 +60,16 @@ function arithmeticKind(node: Arithmetic): Quantity {
 function powerKind({ left, right, at }: Arithmetic): Quantity {
   const exponent = constantValue(right)
   if (exponent === null || Math.abs(exponent) > EXPONENT_MAX) {
-    throw new FormulaError('not-allowed', `An exponent is a number from -${EXPONENT_MAX} to ${EXPONENT_MAX}.`, right.at)
+    throw new FormulaError(
+      'not-allowed',
+      `${PART} can not be an exponent. Write a number from -${EXPONENT_MAX} to ${EXPONENT_MAX}.`,
+      right.at,
+    )
   }
   const base = quantityOf(left)
   const kind = toThePower(base, exponent)
   if (kind) return kind
-  throw new FormulaError('unit-mismatch', `${sentence(kindWords(base))} to the power of ${exponent} are no measure.`, at)
+  throw new FormulaError('unit-mismatch', `${PART} takes ${kindWords(base)} to the power of ${exponent}, which is no measure.`, at)
 }
 
 function callKind({ name, args, at }: Call): Quantity {
@@ -77,13 +81,18 @@ function callKind({ name, args, at }: Call): Quantity {
   if (name !== 'sqrt') return kind
   const root = toThePower(kind, 0.5)
   if (root) return root
-  throw new FormulaError('unit-mismatch', `The square root of ${kindWords(kind)} is no measure; of sq ft it is lineal feet.`, at)
+  throw new FormulaError(
+    'unit-mismatch',
+    `${PART} takes the square root of ${kindWords(kind)}, which is no measure. Of sq ft it is lineal feet.`,
+    at,
+  )
 }
 
 function checkDecimals(node: FormulaNode): void {
   const decimals = constantValue(node)
   const isCount = decimals !== null && Number.isInteger(decimals) && decimals >= 0 && decimals <= 9
-  if (!isCount) throw new FormulaError('not-allowed', 'round keeps 0 to 9 decimals, as round(floor_area, 1).', node.at)
+  if (!isCount)
+    throw new FormulaError('not-allowed', `${PART} is no count of decimals: round keeps 0 to 9, as round(floor_area, 1).`, node.at)
 }
 
 /** The kind of parts that must go together. */
@@ -92,12 +101,8 @@ function commonKind(nodes: readonly FormulaNode[]): Quantity {
     const next = quantityOf(node)
     const common = together(kind, next)
     if (common) return common
-    throw new FormulaError('unit-mismatch', `This mixes ${kindWords(kind)} with ${kindWords(next)}.`, [nodes[0]?.at[0] ?? 0, node.at[1]])
+    throw new FormulaError('unit-mismatch', `${PART} mixes ${kindWords(kind)} with ${kindWords(next)}.`, [nodes[0]?.at[0] ?? 0, node.at[1]])
   }, LITERAL)
-}
-
-function sentence(words: string): string {
-  return words.charAt(0).toUpperCase() + words.slice(1)
 }
 
 /**

@@ -1,11 +1,12 @@
 import { FUNCTION_NAMES } from './formulaFunctions.ts'
-import { FormulaError, type Span } from './formulaError.ts'
+import { FormulaError, PART, type Span } from './formulaError.ts'
 import { FORMULA_MAX_DEPTH, LITERAL_MAX } from './formulaLimits.ts'
 import type { Token } from './tokens.ts'
 
 /** Refuses what a parser would stumble over or read in its own way: brackets that don't pair or nest too deep, operands side by side, numbers too large. */
 export function checkTokens(tokens: readonly Token[]): void {
   checkBrackets(tokens)
+  checkColons(tokens)
   tokens.forEach((token, index) => {
     const next = tokens[index + 1]
     checkNumber(token)
@@ -19,10 +20,20 @@ function checkBrackets(tokens: readonly Token[]): void {
   for (const { text, at } of tokens) {
     if (text === '(') open.push(at)
     if (open.length > FORMULA_MAX_DEPTH) throw new FormulaError('too-deep', `Brackets nest more than ${FORMULA_MAX_DEPTH} deep.`, at)
-    if (text === ')' && open.pop() === undefined) throw new FormulaError('bad-syntax', 'This bracket closes none.', at)
+    if (text === ')' && open.pop() === undefined) throw new FormulaError('bad-syntax', `The bracket at place ${at[0] + 1} closes none.`, at)
   }
   const unclosed = open.at(-1)
-  if (unclosed) throw new FormulaError('bad-syntax', 'This bracket is not closed.', unclosed)
+  if (unclosed) throw new FormulaError('bad-syntax', `The bracket at place ${unclosed[0] + 1} is not closed.`, unclosed)
+}
+
+/** To the parser a colon alone is a range of numbers. */
+function checkColons(tokens: readonly Token[]): void {
+  let open = 0
+  for (const { text, at } of tokens) {
+    if (text === '?') open += 1
+    if (text === ':') open -= 1
+    if (open < 0) throw new FormulaError('bad-syntax', `${PART} stands only after a condition and ?, as height > 8 ? 2 : 1.`, at)
+  }
 }
 
 function checkNumber({ kind, text, at }: Token): void {

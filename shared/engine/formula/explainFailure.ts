@@ -1,7 +1,7 @@
 import { isZero } from './arithmetic.ts'
 import { compileFormula } from './compileFormula.ts'
 import type { FormulaColumns } from './formulaColumns.ts'
-import { FormulaError } from './formulaError.ts'
+import { FormulaError, PART } from './formulaError.ts'
 import { QUANTITY_MAX } from './formulaLimits.ts'
 import { childrenOf, type FormulaNode } from './syntaxTree.ts'
 import type { Measure } from '../takeoff/measure.ts'
@@ -24,7 +24,8 @@ export function explainFailure(node: FormulaNode, row: number, explainer: Explai
 
 function explainNaN(node: FormulaNode, row: number, explainer: Explainer): FormulaError {
   const isNaNHere = (part: FormulaNode) => Number.isNaN(compileFormula(part, explainer.columns)(row))
-  if (node.kind === 'measure') return new FormulaError('no-measure', explainer.whyNoMeasure(node.measure, row), node.at)
+  if (node.kind === 'measure')
+    return new FormulaError('no-measure', `${PART} can not be had. ${explainer.whyNoMeasure(node.measure, row)}`, node.at)
   if (node.kind === 'sum-rooms') return explainSum(node, explainer)
   const culprit = partsWorkedOut(node, row, explainer.columns).find(isNaNHere)
   return culprit ? explainNaN(culprit, row, explainer) : explainStep(node, row, explainer.columns)
@@ -48,14 +49,14 @@ function explainSum({ argument, at }: Extract<FormulaNode, { kind: 'sum-rooms' }
 /** A step that fails although all that goes into it is there. */
 function explainStep(node: FormulaNode, row: number, columns: FormulaColumns): FormulaError {
   if (node.kind === 'arithmetic' && node.operator === '/' && isZero(compileFormula(node.right, columns)(row))) {
-    return new FormulaError('divides-by-zero', 'This divides by zero.', node.right.at)
+    return new FormulaError('divides-by-zero', `${PART} is zero here, and the formula divides by it.`, node.right.at)
   }
   if (node.kind === 'arithmetic' && node.operator === '^' && isZero(compileFormula(node.left, columns)(row))) {
-    return new FormulaError('divides-by-zero', 'This divides by zero: a negative power of zero.', node.at)
+    return new FormulaError('divides-by-zero', `${PART} is a negative power of zero.`, node.at)
   }
   if (node.kind === 'call' && node.name === 'sqrt')
-    return new FormulaError('not-finite', 'This takes the square root of less than zero.', node.at)
-  return new FormulaError('not-finite', 'This has no finite answer.', node.at)
+    return new FormulaError('not-finite', `${PART} takes the square root of less than zero.`, node.at)
+  return new FormulaError('not-finite', `${PART} has no finite answer.`, node.at)
 }
 
 function shown(value: number): string {

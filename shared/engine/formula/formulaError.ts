@@ -15,6 +15,10 @@ export type FormulaCode =
   | 'unknown-name'
   | 'unknown-unit'
 
+/** Stands in a message for the part of the formula that is at fault. */
+export const PART = '{part}'
+const PART_MAX = 40
+
 /** What is wrong with a formula, and where. Caught where the formula is read or computed; it never leaves the engine. */
 export class FormulaError extends Error {
   constructor(
@@ -24,5 +28,11 @@ export class FormulaError extends Error {
   ) {
     super(message)
     this.name = 'FormulaError'
+  }
+
+  /** The message with the part of the text that is at fault in it. */
+  wordsFor(text: string): string {
+    const part = text.slice(...this.at).trim()
+    return this.message.replace(PART, () => `\`${part.length > PART_MAX ? `${part.slice(0, PART_MAX)}…` : part}\``)
   }
 }

@@ -1,4 +1,4 @@
-import { FormulaError, type Span } from './formulaError.ts'
+import { FormulaError, PART, type Span } from './formulaError.ts'
 import { FUNCTIONS, isFunctionName, SUM_ROOMS } from './formulaFunctions.ts'
 import { FORMULA_MAX_DEPTH } from './formulaLimits.ts'
 import { findMeasure, type NameScope } from './measureNames.ts'
@@ -134,7 +134,7 @@ class TreeReader {
   private notAllowed(): FormulaError {
     return new FormulaError(
       'not-allowed',
-      'This has no place in a formula. It takes numbers, measures, + - * / ^, brackets, comparisons, ? : and functions.',
+      `${PART} has no place in a formula. It takes numbers, measures, + - * / ^, brackets, comparisons, ? : and functions.`,
       this.here(),
     )
   }
