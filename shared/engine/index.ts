@@ -14,6 +14,7 @@ export { shapeOutline } from './geometry/shapeOutline.ts'
 export type { Measure, MeasureValue } from './takeoff/measure.ts'
 export { houseMeasures } from './takeoff/houseMeasures.ts'
 export { MEASURES } from './takeoff/measureList.ts'
+export { roofShares } from './takeoff/roofShares.ts'
 export { roomMeasures } from './takeoff/roomMeasures.ts'
 
 export { checkFormula, type CheckedFormula } from './formula/checkFormula.ts'

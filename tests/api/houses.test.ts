@@ -97,6 +97,16 @@ describe('POST /api/houses', () => {
     ['a year before houses', { yearBuilt: 1200 }, 'yearBuilt'],
     ['storeys by thirds', { storeys: 1.3 }, 'storeys'],
     ['a roof steeper than a wall', { roof: [{ kind: 'gable', rise: 30 }] }, 'roof[0].rise'],
+    [
+      'a roof that covers more than the house',
+      {
+        roof: [
+          { kind: 'gable', rise: 6, sharePercent: 80 },
+          { kind: 'flat', rise: 0, sharePercent: 30 },
+        ],
+      },
+      'roof',
+    ],
     ['a length below zero', { wallHeightIn: -1 }, 'wallHeightIn'],
     ['a footprint without width', { footprint: { kind: 'rectangle', lengthIn: 10 } }, 'footprint.widthIn'],
     [

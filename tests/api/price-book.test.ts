@@ -322,6 +322,15 @@ describe('PATCH /api/price-book/draft/items/:key', () => {
     expect(priceless.body).toMatchObject({ status: 422, errors: [{ path: 'installed' }] })
   })
 
+  it("keeps the unit of an item that a region prices itself, until the region's row is dropped", async () => {
+    addPriceBook(app.db, { regions: [], items: [], regionItems: [{ regionKey: 'dear', item: keyedPriceItem() }] })
+    await startDraft()
+    const toEach = () => admin.patch(PLANK).set('If-Match', '"1"').send({ unit: 'each', roomFormula: null, houseFormula: null })
+    expect((await toEach()).body).toMatchObject({ status: 422, errors: [{ path: 'unit', code: 'regions-own' }] })
+    expect((await admin.delete(`${PLANK}?region=dear`).set('If-Match', '"1"')).status).toBe(204)
+    expect((await toEach()).body).toMatchObject({ unit: 'each' })
+  })
+
   it('never changes a key', async () => {
     await startDraft()
     const answer = await admin.patch(PLANK).set('If-Match', '"1"').send({ key: 'floor/other' })

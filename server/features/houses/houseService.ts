@@ -1,4 +1,4 @@
-import { checkShape, defaultSettings } from '../../../shared/engine/index.ts'
+import { checkShape, defaultSettings, roofShares } from '../../../shared/engine/index.ts'
 import type { CurrentUser } from '../../../shared/schemas/account.ts'
 import type { Estimate } from '../../../shared/schemas/estimate.ts'
 import type { AddedHouse, House, HouseFields, HousePatch, HouseSummary } from '../../../shared/schemas/house.ts'
@@ -61,7 +61,7 @@ export function createHouseService({ db, clock, events, priceBook, keeper, repri
 
     /** Adds a house and its working estimate: at the newest prices, with the firm's settings and the region's sales tax. */
     add(user: CurrentUser, fields: HouseFields): AddedHouse {
-      checkFootprint(fields)
+      checkMeasures(fields)
       return inWriteTransaction(db, (tx) => {
         const priceBookVersion = priceBook.newestPublished(tx)
         const region = regionOf(tx, priceBookVersion, fields.regionKey)
@@ -78,7 +78,7 @@ export function createHouseService({ db, clock, events, priceBook, keeper, repri
 
     /** Changes a house. With another region its estimate is priced for that, at the version that it is pinned to. */
     update(user: CurrentUser, id: string, patch: HousePatch, ifMatch: number): House {
-      checkFootprint(patch)
+      checkMeasures(patch)
       return inWriteTransaction(db, (tx) => {
         const before = openHouse(tx, user, id)
         if (before.version !== ifMatch) throw stale(before)
@@ -118,9 +118,14 @@ export function createHouseService({ db, clock, events, priceBook, keeper, repri
   }
 }
 
-/** An outline that no house can have is refused at its place; one that is still to be measured may wait. */
-function checkFootprint({ footprint }: HousePatch): void {
-  const problems = footprint ? checkShape(footprint) : []
-  if (problems.length > 0)
-    throw invalid(problems.map((problem) => ({ ...problem, path: problem.path === '' ? 'footprint' : `footprint.${problem.path}` })))
+/** Measures that no house can have are refused at their place; those that are still to be taken may wait. */
+function checkMeasures({ footprint, roof }: HousePatch): void {
+  const problems = footprint ? checkShape(footprint).map((problem) => ({ ...problem, path: pathBelow('footprint', problem.path) })) : []
+  const hasBadShares = roof !== undefined && roof.length > 0 && roofShares(roof) === null
+  if (hasBadShares) problems.push({ path: 'roof', code: 'bad-shares', message: 'the shares of its groups must come to 100 percent' })
+  if (problems.length > 0) throw invalid(problems)
+}
+
+function pathBelow(field: string, path: string): string {
+  return path === '' ? field : `${field}.${path}`
 }

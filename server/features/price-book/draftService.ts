@@ -1,4 +1,3 @@
-import { checkFormula } from '../../../shared/engine/index.ts'
 import type { CurrentUser } from '../../../shared/schemas/account.ts'
 import {
   priceItemFieldsSchema,
@@ -9,25 +8,20 @@ import {
   type PriceRegion,
   type RegionPatch,
 } from '../../../shared/schemas/priceItem.ts'
-import type { FieldProblem } from '../../../shared/schemas/problem.ts'
 import type { Clock } from '../../config/clock.ts'
 import { afterCommit, inWriteTransaction, type Database, type Queryable, type Transaction } from '../../db/client.ts'
 import { recordAudit } from '../../db/recordAudit.ts'
-import { conflict, invalid, notFound, stale } from '../../errors/AppError.ts'
+import { conflict, notFound, stale } from '../../errors/AppError.ts'
 import { parseInput } from '../../http/parseInput.ts'
 import type { EventHub } from '../events/eventHub.ts'
+import { checkDraftItem } from './checkDraftItem.ts'
+import { currentRow, dropInDraft, rowAsRead, saveInDraft, type ItemAddress } from './draftRows.ts'
 import * as versions from './priceBookVersionRepository.ts'
 import * as items from './priceItemRepository.ts'
-import { columnsOfItem, itemOfRow, type PriceItemRow } from './priceItemRow.ts'
+import { columnsOfItem } from './priceItemRow.ts'
 import * as regions from './priceRegionRepository.ts'
 
 export type DraftService = ReturnType<typeof createDraftService>
-
-/** An item by its key: the base row, or a region's own. */
-export interface ItemAddress {
-  key: string
-  regionKey: string | null
-}
 
 /** The one draft of the price book: begun, edited, then published or dropped. Published rows are never touched by it. */
 export function createDraftService({ db, clock, events }: { db: Database; clock: Clock; events: EventHub }) {
@@ -96,7 +90,7 @@ export function createDraftService({ db, clock, events }: { db: Database; clock:
     addItem(user: CurrentUser, fields: PriceItemFields, regionKey: string | null): PriceItem {
       return inDraft((tx, draft) => {
         const address = { key: fields.key, regionKey }
-        checkItem(tx, draft, fields, regionKey)
+        checkDraftItem(tx, draft, fields, regionKey)
         const { own, older } = items.findDraftRow(tx, draft, regionKey, fields.key)
         const isThere = own === null ? older !== null : !own.isDropped
         if (isThere) throw conflict('key-taken', `The draft already has an item ${fields.key}. Choose another key.`)
@@ -115,7 +109,7 @@ export function createDraftService({ db, clock, events }: { db: Database; clock:
         const { row, before } = rowAsRead(tx, draft, address, ifMatch)
         const { rowVersion: _, ...fieldsBefore } = before
         const fields = parseInput(priceItemFieldsSchema, { ...fieldsBefore, ...patch })
-        checkItem(tx, draft, fields, address.regionKey)
+        checkDraftItem(tx, draft, fields, address.regionKey)
         const rowVersion = row.rowVersion + 1
         saveInDraft(tx, draft, row, { ...columnsOfItem(fields), rowVersion })
         audit(tx, user, 'price-item', auditIdOf(address), 'update', fieldsBefore, fields)
@@ -159,58 +153,4 @@ function versionOf(tx: Queryable, version: number): PriceBookVersion {
 
 function auditIdOf({ key, regionKey }: ItemAddress): string {
   return regionKey === null ? key : `${key} in ${regionKey}`
-}
-
-/** The row that holds in the draft; `null` when there is none or the draft drops it. */
-function currentRow(tx: Queryable, draft: number, { key, regionKey }: ItemAddress): PriceItemRow | null {
-  const { own, older } = items.findDraftRow(tx, draft, regionKey, key)
-  if (own) return own.isDropped ? null : own
-  return older
-}
-
-function rowAsRead(tx: Queryable, draft: number, address: ItemAddress, ifMatch: number): { row: PriceItemRow; before: PriceItem } {
-  const row = currentRow(tx, draft, address)
-  if (!row) throw notFound('price item')
-  const before = itemOfRow(row)
-  if (row.rowVersion !== ifMatch) throw stale(before)
-  return { row, before }
-}
-
-/** The draft's own row is changed; an older one stays and gets a successor. */
-function saveInDraft(tx: Queryable, draft: number, row: PriceItemRow, columns: Partial<PriceItemRow>): void {
-  const { id, ...rest } = row
-  if (row.fromVersion === draft) items.updateItemRow(tx, id, columns)
-  else items.insertItemRow(tx, { ...rest, ...columns, fromVersion: draft })
-}
-
-function dropInDraft(tx: Queryable, draft: number, row: PriceItemRow): void {
-  const { older } = items.findDraftRow(tx, draft, row.regionKey, row.key)
-  const isOfDraftAlone = older === null
-  if (isOfDraftAlone) items.deleteItemRow(tx, row.id)
-  else saveInDraft(tx, draft, row, { isDropped: true, rowVersion: row.rowVersion + 1 })
-}
-
-/** What the schema can't see: formulas that fit the unit, and for a region's own row the item and the region that it belongs to. */
-function checkItem(tx: Queryable, draft: number, fields: PriceItemFields, regionKey: string | null): void {
-  const problems = [...formulaProblems(fields), ...(regionKey === null ? [] : regionProblems(tx, draft, fields, regionKey))]
-  if (problems.length > 0) throw invalid(problems)
-}
-
-function formulaProblems({ roomFormula, houseFormula, unit }: PriceItemFields): FieldProblem[] {
-  const formulas = [
-    { path: 'roomFormula', scope: 'room', text: roomFormula },
-    { path: 'houseFormula', scope: 'house', text: houseFormula },
-  ] as const
-  return formulas.flatMap(({ path, scope, text }) => {
-    if (text === null) return []
-    const checked = checkFormula(text, { scope, unit })
-    return checked.ok ? [] : [{ path, code: checked.code, message: checked.message }]
-  })
-}
-
-function regionProblems(tx: Queryable, draft: number, { key, unit }: PriceItemFields, regionKey: string): FieldProblem[] {
-  if (!regions.findRegion(tx, draft, regionKey)) throw notFound('region')
-  const base = currentRow(tx, draft, { key, regionKey: null })
-  if (!base) return [{ path: 'key', code: 'unknown-item', message: 'is not an item of the draft: a region prices an item that there is' }]
-  return base.unit === unit ? [] : [{ path: 'unit', code: 'other-unit', message: `must be ${base.unit}, as the item itself` }]
 }
