@@ -72,7 +72,12 @@ describe('TheHouseFrame', () => {
 
   it('stacks the stages in the order of the work and says where each stands', async () => {
     const wrapper = await openFrame('estimator')
-    const stages = wrapper.findAll('.corner-rail a').map((stage) => stage.attributes('aria-label'))
+    const stages = wrapper.findAll('.corner-rail a').map((stage) =>
+      stage
+        .findAll('span')
+        .map((part) => part.text())
+        .join(', '),
+    )
     expect(stages).toEqual([
       'Details, to measure, not begun',
       'Rooms, 12 rooms, done',
