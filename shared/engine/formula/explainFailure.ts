@@ -17,6 +17,9 @@ export interface Explainer {
 /** Why a formula has no answer, or none that is a quantity: the innermost part that has none, with its span. Only for one that fails. */
 export function explainFailure(node: FormulaNode, row: number, explainer: Explainer): FormulaError {
   const value = compileFormula(node, explainer.columns)(row)
+  // A formula that is one measure needs not be told which.
+  if (node.kind === 'measure' && Number.isNaN(value))
+    return new FormulaError('no-measure', explainer.whyNoMeasure(node.measure, row), node.at)
   if (Number.isNaN(value)) return explainNaN(node, row, explainer)
   if (value < 0) return new FormulaError('negative', `The formula gives ${shown(value)}; a quantity is zero or more.`, node.at)
   return new FormulaError('too-large', `The formula gives ${shown(value)}; a quantity is at most ${shown(QUANTITY_MAX)}.`, node.at)
