@@ -37,6 +37,7 @@ export default defineConfig({
           environment: 'jsdom',
           include: ['tests/components/**/*.test.ts'],
           setupFiles: ['tests/support/componentsSetup.ts'],
+          testTimeout: 20_000,
           sequence: { groupOrder: 0 },
         },
       },
