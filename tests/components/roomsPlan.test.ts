@@ -2,6 +2,7 @@ import { mount } from '@vue/test-utils'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { labelSpot } from '../../src/components/rooms/labelSpot.ts'
+import { placeDimensions } from '../../src/components/rooms/placeDimensions.ts'
 import { placeOnWalls, wallPieces } from '../../src/components/rooms/placeOnWalls.ts'
 import { planLayout } from '../../src/components/rooms/planLayout.ts'
 import RoomPlan from '../../src/components/rooms/RoomPlan.vue'
@@ -148,5 +149,30 @@ describe('labelSpot', () => {
     ])
     const [x = 0, y = 0] = spot?.at ?? []
     expect(x < 40 || y < 40).toBe(true)
+  })
+})
+
+describe('placeDimensions', () => {
+  const SPACE = { nearest: 16, thickness: 5 }
+  const horizontal = (fromX: number, toX: number) => ({
+    from: [fromX, 100] as Corner,
+    to: [toX, 100] as Corner,
+    outward: [0, -1] as Corner,
+    text: `12' 6"`,
+  })
+
+  it('stands each dimension as near as may be', () => {
+    expect(placeDimensions([horizontal(0, 200)], SPACE)).toEqual([{ offset: 16, textOffset: 16 }])
+  })
+
+  it('puts the words off the line where the wall is shorter than they are', () => {
+    expect(placeDimensions([horizontal(0, 20)], SPACE)).toEqual([{ offset: 16, textOffset: 29 }])
+  })
+
+  it('moves a dimension out whose words would run into those of a longer wall', () => {
+    const [short, long] = placeDimensions([horizontal(0, 60), { ...horizontal(10, 70), from: [10, 102], to: [75, 102] }], SPACE)
+
+    expect(long?.offset).toBe(16)
+    expect(short?.offset).toBeGreaterThan(16)
   })
 })

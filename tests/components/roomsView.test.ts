@@ -1,5 +1,6 @@
 import { flushPromises, type VueWrapper } from '@vue/test-utils'
 import { afterEach, describe, expect, it, vi } from 'vitest'
+import { queryClient } from '../../src/api/queryClient.ts'
 import { useUndoToast } from '../../src/composables/useUndoToast.ts'
 import RoomsView from '../../src/views/RoomsView.vue'
 import type { Room } from '../../shared/schemas/room.ts'
@@ -174,6 +175,27 @@ describe('RoomsView', () => {
     await flushPromises()
 
     expect(names(wrapper)).toEqual(['Front bedroom', 'Kitchen'])
+  })
+
+  it('tells of a room that somebody else removed while it was open', async () => {
+    const { api, wrapper } = await openRooms([bedroom, kitchen], '?room=r2')
+    api.answers['GET /houses/h1/rooms'] = [bedroom]
+
+    await queryClient.invalidateQueries({ queryKey: ['house', 'h1', 'rooms'] })
+    await flushPromises()
+
+    expect(useUndoToast().toasts.value.at(-1)?.text).toContain('Kitchen was removed by somebody else.')
+    expect(wrapper.get('.room-pane h2').text()).toBe('Front bedroom')
+  })
+
+  it('takes in what somebody else keyed into the open room', async () => {
+    const { api, wrapper } = await openRooms([bedroom, kitchen], '?room=r2')
+    api.answers['GET /houses/h1/rooms'] = [bedroom, { ...kitchen, version: 2, name: 'Eat-in kitchen' }]
+
+    await queryClient.invalidateQueries({ queryKey: ['house', 'h1', 'rooms'] })
+    await flushPromises()
+
+    expect((wrapper.get('.room-form input').element as HTMLInputElement).value).toBe('Eat-in kitchen')
   })
 
   it('duplicates a room below itself under the next free name', async () => {

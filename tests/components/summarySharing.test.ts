@@ -14,12 +14,12 @@ const SHARE = { userId: 'o1', name: 'Ilse Varden', email: 'ilse@varden.example',
 async function openDialog(answers: Record<string, unknown> = {}, role: 'admin' | 'estimator' = 'estimator') {
   const api = stubApi({ 'GET /owners': OWNERS, 'GET /houses/h1/shares': [SHARE], ...answers })
   const { wrapper } = await mountInApp(ShareHouseDialog, { role, props: { houseId: 'h1', isOpen: true } })
+  const dialog = await vi.waitUntil(() => document.querySelector<HTMLElement>('[role="dialog"]'))
   await flushPromises()
-  const dialog = document.querySelector('[role="dialog"]') as HTMLElement
   return { api, wrapper, dialog }
 }
 
-function press(dialog: HTMLElement, name: string): Promise<void> {
+function press(dialog: HTMLElement, name: string): Promise<unknown> {
   const button = [...dialog.querySelectorAll('button')].find((one) => (one.getAttribute('aria-label') ?? one.textContent)?.trim() === name)
   button?.click()
   return flushPromises()

@@ -4,8 +4,15 @@ import { useRoomDraftsStore } from '../../stores/roomDrafts.ts'
 import type { RoomDraft } from './roomDraft.ts'
 import { roomEditor, type RoomEditor } from './roomEditor.ts'
 
+interface RoomEditorsOptions {
+  send(room: Room, patch: RoomPatch): Promise<Room>
+  onSaved(room: Room): void
+  /** Somebody else has removed a room that was open here. */
+  onGone(name: string): void
+}
+
 /** An editor for each room that has been opened, or that holds something unsaved from the last time; all are saved when the page is left. */
-export function useRoomEditors(send: (room: Room, patch: RoomPatch) => Promise<Room>, onSaved: (room: Room) => void) {
+export function useRoomEditors({ send, onSaved, onGone }: RoomEditorsOptions) {
   const drafts = useRoomDraftsStore()
   const editors = shallowReactive(new Map<string, RoomEditor>())
 
@@ -29,6 +36,12 @@ export function useRoomEditors(send: (room: Room, patch: RoomPatch) => Promise<R
       const editor = editors.get(room.id)
       if (editor) editor.save.hear(room)
       else if (drafts.takeUp(room.id)) open(room)
+    }
+    for (const [roomId, editor] of editors) {
+      const isGone = rooms.every(({ id }) => id !== roomId)
+      if (!isGone) continue
+      onGone(editor.save.saved.value.name)
+      void close(roomId)
     }
   }
 

@@ -3,6 +3,7 @@ import { roomMeasures, type RoomInput } from '../../../shared/engine/index.ts'
 import type { Room, RoomFields } from '../../../shared/schemas/room.ts'
 import { useRoomActions } from '../../composables/useRoomActions.ts'
 import { useRoomAdds } from '../../composables/useRoomAdds.ts'
+import { useUndoToast } from '../../composables/useUndoToast.ts'
 import { useRoomDraftsStore } from '../../stores/roomDrafts.ts'
 import { blankDraft } from './blankDraft.ts'
 import { copyName } from './copyName.ts'
@@ -22,7 +23,12 @@ export interface AddedRoom {
 export function useRoomsPage(houseId: string, rooms: Readonly<Ref<Room[] | undefined>>) {
   const drafts = useRoomDraftsStore()
   const actions = useRoomActions(houseId)
-  const { editors, open, hear, close } = useRoomEditors(actions.save, actions.takeIn)
+  const { say } = useUndoToast()
+  const { editors, open, hear, close } = useRoomEditors({
+    send: actions.save,
+    onSaved: actions.takeIn,
+    onGone: (name) => say(`${name} was removed by somebody else. What you keyed there is kept on this device in case it comes back.`),
+  })
   const lastAdded = ref<AddedRoom | null>(null)
   const copies = new Set<string>()
   const adds = useRoomAdds(houseId, (room, key) => {
