@@ -10,6 +10,6 @@ const app = createApp(App)
 
 app.use(createPinia())
 app.use(VueQueryPlugin, { queryClient })
-app.use(createAppRouter(app))
+app.use(createAppRouter())
 
 app.mount('#app')

@@ -2,7 +2,6 @@ import { definePreset } from '@primevue/themes'
 import base from '@primevue/themes/aura/base'
 import dialog from '@primevue/themes/aura/dialog'
 import drawer from '@primevue/themes/aura/drawer'
-import menu from '@primevue/themes/aura/menu'
 
 /** A scale of eleven shades between a wash and the deep shade, all of them words and grounds of tokens.css. */
 function shades(wash: string, colour: string, deep: string) {
@@ -44,7 +43,7 @@ const surface = {
 }
 
 /** The tokens of the components that are used: those of all of them would be the larger part of a page. A component that is taken into use is added here. */
-const usedPart = { ...base, components: { dialog, drawer, menu } }
+const usedPart = { ...base, components: { dialog, drawer } }
 
 /**
  * PrimeVue in the app's tokens. They flip with the theme by themselves, so there is one scheme here and not two,

@@ -1,4 +1,3 @@
-import type { App } from 'vue'
 import type { RouteLocationNormalized, Router } from 'vue-router'
 import { onSignedOut } from '../api/http.ts'
 import { useSessionStore } from '../stores/session.ts'
@@ -7,14 +6,13 @@ import { navigationProblem } from './navigationProblem.ts'
 const SIGNED_OUT_NOTICE = 'You were signed out. Sign in to go on where you were.'
 
 /** Sends people who aren't signed in to the sign-in and back, and keeps from each role the pages that aren't theirs. */
-export function guardRoutes(router: Router, app: App): void {
+export function guardRoutes(router: Router): void {
   const session = useSessionStore()
 
   router.beforeEach(async (to) => {
     if (to.meta.isPublic) return true
     await session.load()
     if (!session.isSignedIn) return signInAnd(to)
-    await loadSignedInParts(app)
     if (to.meta.action && !session.may(to.meta.action)) return missing(to)
     if (to.name === 'house') return { name: firstHousePage(session.may('room.write')), params: to.params, replace: true }
     return true
@@ -47,12 +45,4 @@ function missing(to: RouteLocationNormalized) {
 
 function firstHousePage(mayKeyRooms: boolean) {
   return mayKeyRooms ? 'rooms' : 'summary'
-}
-
-let signedInParts: Promise<void> | null = null
-
-/** Keeps PrimeVue and its theme off the pages before the sign-in. */
-function loadSignedInParts(app: App): Promise<void> {
-  signedInParts ??= import('../assets/installPrimeVue.ts').then(({ installPrimeVue }) => installPrimeVue(app))
-  return signedInParts
 }

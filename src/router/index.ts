@@ -1,15 +1,14 @@
-import type { App } from 'vue'
 import { createRouter, createWebHistory, type Router } from 'vue-router'
 import { guardRoutes } from './guards.ts'
 import { routes } from './routes.ts'
 
-/** The router of the app; Pinia must be installed before it. */
-export function createAppRouter(app: App): Router {
+/** The router of the app; Pinia must be installed before it is made. */
+export function createAppRouter(): Router {
   const router = createRouter({
     history: createWebHistory(),
     routes,
     scrollBehavior: (_to, _from, savedPosition) => savedPosition ?? { top: 0 },
   })
-  guardRoutes(router, app)
+  guardRoutes(router)
   return router
 }

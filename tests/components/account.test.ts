@@ -8,6 +8,9 @@ import ResetPasswordView from '../../src/views/ResetPasswordView.vue'
 import { buildCurrentUser, mountInApp } from '../support/mountInApp.ts'
 import { problemAnswer, StubAnswer, stubApi } from '../support/stubApi.ts'
 
+/** Pages are loaded when they are opened, which takes a busy machine its time. */
+const PATIENTLY = { timeout: 10_000 }
+
 afterEach(() => vi.unstubAllGlobals())
 
 async function send(wrapper: VueWrapper): Promise<void> {
@@ -59,7 +62,7 @@ describe('AccountView', () => {
       .findAll('button')
       .find((button) => button.text() === 'Sign out everywhere')!
       .trigger('click')
-    await vi.waitFor(() => expect(router.currentRoute.value.name).toBe('sign-in'))
+    await vi.waitFor(() => expect(router.currentRoute.value.name).toBe('sign-in'), PATIENTLY)
     expect(api.callsTo('DELETE /sessions')).toHaveLength(1)
     expect(session.notice).toBe('You are signed out on every device.')
   })
@@ -82,7 +85,7 @@ describe('ResetPasswordView', () => {
     const { wrapper, router, session } = await mountInApp(ResetPasswordView, { at: '/reset-password?token=a.b.c' })
     await wrapper.get('input').setValue('another pass phrase')
     await send(wrapper)
-    await vi.waitFor(() => expect(router.currentRoute.value.name).toBe('sign-in'))
+    await vi.waitFor(() => expect(router.currentRoute.value.name).toBe('sign-in'), PATIENTLY)
     expect(api.calls[0]?.body).toEqual({ token: 'a.b.c', newPassword: 'another pass phrase' })
     expect(session.notice).toContain('Your new password is set')
   })
@@ -110,7 +113,7 @@ describe('AcceptInvitationView', () => {
     await wrapper.get('input[autocomplete=name]').setValue('Ana Reed')
     await wrapper.get('input[autocomplete=new-password]').setValue('another pass phrase')
     await send(wrapper)
-    await vi.waitFor(() => expect(router.currentRoute.value.name).toBe('houses'))
+    await vi.waitFor(() => expect(router.currentRoute.value.name).toBe('houses'), PATIENTLY)
     expect(api.callsTo('POST /invitations/accept')[0]?.body).toEqual({
       token: 'a.b.c',
       name: 'Ana Reed',

@@ -24,6 +24,9 @@ function buildSummary(overrides: Partial<HouseSummary> = {}): HouseSummary {
   }
 }
 
+/** Pages are loaded when they are opened, which takes a busy machine its time. */
+const PATIENTLY = { timeout: 10_000 }
+
 afterEach(() => vi.unstubAllGlobals())
 
 async function openList(houses: HouseSummary[], role: 'estimator' | 'owner' = 'estimator') {
@@ -109,7 +112,7 @@ describe('HouseListView', () => {
       Object.defineProperty(input.element, 'files', { value: [file], configurable: true })
       Object.defineProperty(input.element, 'value', { value: '', writable: true, configurable: true })
       await input.trigger('change')
-      await vi.waitFor(() => expect(wrapper.get('.button').attributes('aria-busy')).toBeUndefined())
+      await vi.waitFor(() => expect(wrapper.get('.button').attributes('aria-busy')).toBeUndefined(), PATIENTLY)
       await flushPromises()
     }
 
@@ -118,7 +121,7 @@ describe('HouseListView', () => {
       api.answers['POST /houses/import'] = new StubAnswer(201, { house: { id: 'h9', name: 'Imported' }, estimateId: 'e9' })
       await choose(wrapper, '{"format":"x","rooms":[]}')
       expect(api.callsTo('POST /houses/import')[0]?.body).toEqual({ format: 'x', rooms: [] })
-      await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/houses/h9/rooms'))
+      await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/houses/h9/rooms'), PATIENTLY)
     })
 
     it('names each field that can’t be read', async () => {

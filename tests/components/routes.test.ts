@@ -1,7 +1,6 @@
 import { flushPromises } from '@vue/test-utils'
 import { createPinia, setActivePinia } from 'pinia'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
-import { createApp } from 'vue'
 import { createMemoryHistory, createRouter, type Router } from 'vue-router'
 import type { Role } from '../../shared/schemas/account.ts'
 import { http } from '../../src/api/http.ts'
@@ -20,7 +19,7 @@ beforeEach(() => {
   // The pages themselves are no part of this.
   const empty = { render: () => null }
   router = createRouter({ history: createMemoryHistory(), routes: withComponent(routes, empty) })
-  guardRoutes(router, createApp({}))
+  guardRoutes(router)
 })
 afterEach(() => vi.unstubAllGlobals())
 

@@ -12,6 +12,9 @@ const DEMO = {
 }
 const NO_DEMO = { name: 'A firm', isDemo: false, hasOutbox: false, demoAccounts: [] }
 
+/** Pages are loaded when they are opened, which takes a busy machine its time. */
+const PATIENTLY = { timeout: 10_000 }
+
 afterEach(() => vi.unstubAllGlobals())
 
 async function openSignIn(answers: Record<string, unknown>, at = '/sign-in') {
@@ -29,7 +32,7 @@ describe('SignInView', () => {
     await wrapper.get('input[type=email]').setValue(' Estimator@AlderFinch.example ')
     await wrapper.get('input[type=password]').setValue('a pass phrase')
     await wrapper.get('form').trigger('submit')
-    await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/account'))
+    await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/account'), PATIENTLY)
     expect(session.user?.role).toBe('estimator')
   })
 
@@ -41,7 +44,7 @@ describe('SignInView', () => {
     await wrapper.get('input[type=email]').setValue('owner@alderfinch.example')
     await wrapper.get('input[type=password]').setValue('a pass phrase')
     await wrapper.get('form').trigger('submit')
-    await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/'))
+    await vi.waitFor(() => expect(router.currentRoute.value.path).toBe('/'), PATIENTLY)
   })
 
   it('says what the server has against it and keeps what was typed', async () => {

@@ -1,8 +1,12 @@
 import { config, enableAutoUnmount } from '@vue/test-utils'
 import PrimeVue from 'primevue/config'
 import { afterEach, beforeEach, vi, type MockInstance } from 'vitest'
+import { loadOverlay } from '../../src/components/base/usePrimeOverlay.ts'
 
 config.global.plugins.push([PrimeVue, { unstyled: true }])
+
+// A dialog opens at once in the tests, as it does in the app when it has been opened before.
+await Promise.all([loadOverlay('dialog', undefined), loadOverlay('drawer', undefined)])
 
 // jsdom has no layout, so it has none of these; overlays ask for them.
 window.matchMedia ??= (query: string) =>

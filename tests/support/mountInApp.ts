@@ -1,7 +1,7 @@
 import { VueQueryPlugin } from '@tanstack/vue-query'
 import { flushPromises, mount, type VueWrapper } from '@vue/test-utils'
 import { createPinia, setActivePinia, type Pinia } from 'pinia'
-import { createApp, type Component } from 'vue'
+import type { Component } from 'vue'
 import { createMemoryHistory, createRouter, type Router } from 'vue-router'
 import type { CurrentUser, Role } from '../../shared/schemas/account.ts'
 import { queryClient } from '../../src/api/queryClient.ts'
@@ -36,7 +36,7 @@ export async function mountInApp(
 ): Promise<MountedInApp> {
   const pinia = freshPinia(role)
   const router = createRouter({ history: createMemoryHistory(), routes })
-  guardRoutes(router, createApp({}))
+  guardRoutes(router)
   await router.push(at)
   const wrapper = mount(component, {
     props,
