@@ -207,6 +207,16 @@ describe('copyName', () => {
 })
 
 describe('wall runs that are not closed yet', () => {
+  it('count the row that waits for the next wall for nothing', () => {
+    const { fields, problems } = problemsOf((draft) => {
+      draft.shapeKind = 'polygon'
+      draft.walk.runs.push({ id: 999, lengthText: '', turn: 'right', angleText: '' })
+    })
+
+    expect(problems).toEqual([])
+    expect(fields.shape).toMatchObject({ kind: 'polygon' })
+  })
+
   it('are no fault when only the line home crosses a wall', () => {
     const { fields, problems } = problemsOf((draft) => {
       draft.shapeKind = 'polygon'

@@ -108,7 +108,7 @@ function readShape(draft: RoomDraft, problems: DraftProblem[]): { shape: Shape |
 
 /** The walk, when every wall of it can be read; `null` otherwise. */
 export function readWalk({ start, headingDegrees, runs }: RoomDraft['walk']): WallWalk | null {
-  const read = runs.map((run) => readRun(run, []))
+  const read = keyedRuns(runs).map((run) => readRun(run, []))
   return read.every((run) => run !== null) ? { start, headingDegrees, runs: read } : null
 }
 
@@ -116,7 +116,7 @@ function readPolygon(
   { start, headingDegrees, runs }: RoomDraft['walk'],
   problems: DraftProblem[],
 ): { shape: Shape | null; walk: WallWalk } {
-  const read = runs.map((run) => readRun(run, problems))
+  const read = keyedRuns(runs).map((run) => readRun(run, problems))
   const firstUnread = read.indexOf(null)
   const readable = (firstUnread === -1 ? read : read.slice(0, firstUnread)) as WallRun[]
   const walk = { start, headingDegrees, runs: readable }
@@ -128,6 +128,12 @@ function readPolygon(
     return { shape: null, walk }
   }
   return { shape: isWhole ? { kind: 'polygon', corners } : null, walk }
+}
+
+/** A row that waits at the end for the next wall is no wall yet. */
+function keyedRuns(runs: readonly RunDraft[]): readonly RunDraft[] {
+  const last = runs.findLastIndex(({ lengthText }) => lengthText.trim() !== '')
+  return runs.slice(0, last + 1)
 }
 
 function readRun(run: RunDraft, problems: DraftProblem[]): WallRun | null {
