@@ -32,8 +32,18 @@ export default tseslint.config(
     files: ['shared/**/*.ts'],
     rules: refuse(['^(?!\\.{1,2}/|zod$|mathjs)'], 'shared imports nothing but zod and the parser of mathjs'),
   },
-  { files: ['shared/**/*.ts'], ignores: ['shared/engine/formula/**'], rules: refuse(['^(?!\\.{1,2}/|zod$)'], 'only shared/engine/formula may import mathjs') },
-  { files: ['src/**/*.{ts,vue}'], rules: refuse(['/server/', '/seed/', '^node:', '^hyperformula'], 'the client imports from src and shared alone') },
-  { files: ['server/**/*.ts'], rules: refuse(['/src/', '/tests/', '^vue', '^hyperformula'], 'the server imports from server, shared and seed alone') },
+  {
+    files: ['shared/**/*.ts'],
+    ignores: ['shared/engine/formula/**'],
+    rules: refuse(['^(?!\\.{1,2}/|zod$)'], 'only shared/engine/formula may import mathjs'),
+  },
+  {
+    files: ['src/**/*.{ts,vue}'],
+    rules: refuse(['/server/', '/seed/', '^node:', '^hyperformula'], 'the client imports from src and shared alone'),
+  },
+  {
+    files: ['server/**/*.ts'],
+    rules: refuse(['/src/', '/tests/', '^vue', '^hyperformula'], 'the server imports from server, shared and seed alone'),
+  },
   { files: ['server/commands/**', 'tests/bench/**', 'seed/**'], rules: { 'no-console': 'off' } },
 )

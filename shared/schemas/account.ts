@@ -19,11 +19,18 @@ export const newPasswordSchema = z
   .refine((text) => byteLength(text) <= PASSWORD_MAX_BYTES, `is longer than ${PASSWORD_MAX_BYTES} bytes`)
 
 export const signInSchema = z.strictObject({ email: emailSchema, password: z.string().min(1, 'is empty').max(200) })
-export const passwordChangeSchema = z.strictObject({ currentPassword: z.string().min(1, 'is empty').max(200), newPassword: newPasswordSchema })
+export const passwordChangeSchema = z.strictObject({
+  currentPassword: z.string().min(1, 'is empty').max(200),
+  newPassword: newPasswordSchema,
+})
 export const passwordResetRequestSchema = z.strictObject({ email: emailSchema })
 export const passwordResetSchema = z.strictObject({ token: z.string().min(1).max(2000), newPassword: newPasswordSchema })
 export const invitationSchema = z.strictObject({ email: emailSchema, name: nameSchema, role: roleSchema })
-export const invitationAcceptSchema = z.strictObject({ token: z.string().min(1).max(2000), name: nameSchema, newPassword: newPasswordSchema })
+export const invitationAcceptSchema = z.strictObject({
+  token: z.string().min(1).max(2000),
+  name: nameSchema,
+  newPassword: newPasswordSchema,
+})
 
 export const personSchema = z.object({
   id: idSchema,

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { nameSchema, noteSchema } from '../../schemas/common.ts'
+import { NAME_MAX, nameSchema, noteSchema } from '../../schemas/common.ts'
 import {
   DEDUCTION_KINDS,
   OPENING_COUNT_MAX,
@@ -9,6 +9,7 @@ import {
   type Deduction,
   type Opening,
   type RoomFields,
+  type RoomUse,
 } from '../../schemas/room.ts'
 import { lengthField } from './documentFields.ts'
 import { documentKey } from './documentKey.ts'
@@ -43,11 +44,18 @@ const deductionDocument = z
   })
   .transform(({ width, height, depth, ...rest }): Deduction => ({ ...rest, widthIn: width, heightIn: height, depthIn: depth }))
 
+/** Other programs call a room what they will: a use that isn't known here is another kind of room, not a wrong document. */
+const useField = z
+  .string()
+  .max(NAME_MAX)
+  .default('other')
+  .transform((use): RoomUse => ROOM_USES.find((known) => known === use.trim().toLowerCase()) ?? 'other')
+
 export const roomDocument = z
   .strictObject({
     key: documentKey,
     name: nameSchema,
-    use: z.enum(ROOM_USES).default('other'),
+    use: useField,
     shape: shapeDocument,
     ceiling: ceilingDocument.nullish(),
     openings: z.array(openingDocument).max(ROOM_OPENINGS_MAX).default([]),
