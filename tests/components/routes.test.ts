@@ -111,7 +111,7 @@ describe('when the session ends while a page is open', () => {
 
 describe('when the server can’t be reached at the first page', () => {
   it('says so in place of the page', async () => {
-    vi.mocked(console.warn).mockImplementation(() => {})
+    vi.spyOn(console, 'warn').mockImplementation(() => {})
     stubApi({ 'GET /sessions/current': new TypeError('Failed to fetch') })
     await router.push('/people').catch(() => {})
     expect(navigationProblem.value).toMatchObject({ wanted: '/people' })
