@@ -7,7 +7,7 @@ import { sumFormula, sumWhereFormula } from './moneyFormulas.ts'
 import { CLEAR, ribbonFormula, ribbonText } from './rangeRibbon.ts'
 import { live, number, text, type SheetDraft } from './sheetDraft.ts'
 import { SUMMARY_COLUMN as COLUMN } from './summaryColumns.ts'
-import type { SummaryParts } from './summarySheet.ts'
+import type { SummaryParts } from './summaryParts.ts'
 import { HOUSE_NUMBER, type WorkbookLine } from './workbookLines.ts'
 
 const ENDS = ['low', 'likely', 'high'] as const

@@ -2,7 +2,7 @@ import { ESTIMATE_COLUMN } from './estimateLayout.ts'
 import { sumOfHours } from './lineSums.ts'
 import { live, text, type SheetDraft } from './sheetDraft.ts'
 import { SUMMARY_COLUMN as COLUMN } from './summaryColumns.ts'
-import type { SummaryParts } from './summarySheet.ts'
+import type { SummaryParts } from './summaryParts.ts'
 import type { WorkbookCell } from './workbookModel.ts'
 
 /** Facts about the house and the estimate, in two columns. Returns the last row. */

@@ -1,27 +1,16 @@
-import type { EstimateWhole } from '../../schemas/estimate.ts'
 import type { EstimateResults } from '../../schemas/results.ts'
-import type { EstimateLayout } from './estimateLayout.ts'
 import { setBreakdowns } from './summaryBreakdowns.ts'
 import { SUMMARY_COLUMN, SUMMARY_WIDTHS } from './summaryColumns.ts'
 import { setFacts } from './summaryFacts.ts'
+import type { SummaryParts } from './summaryParts.ts'
 import { setTotals } from './summaryTotals.ts'
 import { live, SheetDraft, text } from './sheetDraft.ts'
 import { SHEET_TITLES } from './sheetTitles.ts'
 import { DOTTED, ribbonFormula, ribbonText } from './rangeRibbon.ts'
-import type { WorkbookContext } from './workbookContext.ts'
-import type { WorkbookLine } from './workbookLines.ts'
 import type { NamedCell, WorkbookSheet } from './workbookModel.ts'
 
 const BIG_RIBBON_CHARS = 132
 const ENDS = ['low', 'likely', 'high'] as const
-
-export interface SummaryParts {
-  whole: EstimateWhole
-  results: EstimateResults
-  lines: readonly WorkbookLine[]
-  layout: EstimateLayout
-  context: WorkbookContext
-}
 
 /** What the owner and the lender read first: whose house, what range, how it is made up. */
 export function summarySheet(parts: SummaryParts): { sheet: WorkbookSheet; names: NamedCell[] } {

@@ -8,7 +8,7 @@ import { sumWhereFormula } from './moneyFormulas.ts'
 import { TAX_RULE_CHOICES, taxRuleWords } from './settingsWords.ts'
 import { live, number, text, type SheetDraft } from './sheetDraft.ts'
 import { SUMMARY_COLUMN as COLUMN } from './summaryColumns.ts'
-import type { SummaryParts } from './summarySheet.ts'
+import type { SummaryParts } from './summaryParts.ts'
 import type { WorkbookCell } from './workbookModel.ts'
 
 const ENDS = ['low', 'likely', 'high'] as const
