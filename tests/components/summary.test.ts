@@ -1,6 +1,8 @@
 import { flushPromises } from '@vue/test-utils'
+import fc from 'fast-check'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import { totalWords } from '../../src/components/summary/totalWords.ts'
+import { wholePercents } from '../../src/components/summary/wholePercents.ts'
 import SummaryView from '../../src/views/SummaryView.vue'
 import { buildSummaryAnswer } from '../support/buildSummaryAnswer.ts'
 import { mountInApp } from '../support/mountInApp.ts'
@@ -126,6 +128,24 @@ describe('totalWords', () => {
   it('names both ends for what they are', () => {
     expect(totalWords({ low: 5_130_000, likely: 6_420_000, high: 8_390_000 })).toBe(
       'Likely $64,200. If everything goes well $51,300, the sum of all the low figures; if everything goes badly $83,900, the sum of all the high ones.',
+    )
+  })
+})
+
+describe('wholePercents', () => {
+  it('gives the point left over to the greatest remainder', () => {
+    expect(wholePercents([15.5, 84.5])).toEqual([16, 84])
+    expect(wholePercents([33.3, 33.3, 33.4])).toEqual([33, 33, 34])
+    expect(wholePercents([0, 0, 0, 0])).toEqual([0, 0, 0, 0])
+  })
+
+  it('always sums to 100 where the shares do', () => {
+    fc.assert(
+      fc.property(fc.array(fc.integer({ min: 1, max: 1000 }), { minLength: 1, maxLength: 6 }), (parts) => {
+        const sum = parts.reduce((total, part) => total + part, 0)
+        const percents = wholePercents(parts.map((part) => (part / sum) * 100))
+        expect(percents.reduce((total, part) => total + part, 0)).toBe(100)
+      }),
     )
   })
 })
