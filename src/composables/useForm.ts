@@ -23,6 +23,8 @@ export function useForm<Values extends object, Body>({ schema, initial, submit: 
   const schemaErrors: Ref<Record<string, string>> = ref({})
   /** What the server has against a field, until the field changes. */
   const serverErrors: Ref<Record<string, { message: string; about: string }>> = ref({})
+  /** Fields that the form shows. What the server has against any other is said for the whole. */
+  const shownPaths = new Set<string>()
   /** Fields whose text can't be read yet, by what their own control says. */
   const held: Record<string, string> = reactive({})
   /** What is wrong with the whole. */
@@ -44,6 +46,7 @@ export function useForm<Values extends object, Body>({ schema, initial, submit: 
   }
 
   function errorOf(path: string): string {
+    shownPaths.add(path)
     return schemaErrors.value[path] ?? serverErrors.value[path]?.message ?? ''
   }
 
@@ -80,7 +83,7 @@ export function useForm<Values extends object, Body>({ schema, initial, submit: 
   function take(error: unknown): void {
     const errors = error instanceof ProblemError ? error.errors : []
     serverErrors.value = Object.fromEntries(errors.map(({ path, message }) => [path, { message, about: textAt(path) }]))
-    const isSaidByFields = errors.length > 0 && errors.every(({ path }) => path in values)
+    const isSaidByFields = errors.length > 0 && errors.every(({ path }) => shownPaths.has(path))
     problem.value = isSaidByFields ? '' : errorMessage(error)
   }
 

@@ -103,11 +103,12 @@ describe('TheHouseFrame', () => {
     expect(wrapper.text()).not.toContain('Share')
   })
 
-  it('says that a house is not there, without a way to try again', async () => {
+  it('says that a house is not there, and leads back to those that are', async () => {
     const wrapper = await openFrame('estimator', {
       'GET /houses/h1': problemAnswer(404, 'not-found', 'There is no such house, or it isn’t shared with you.'),
     })
-    expect(wrapper.get('[role=alert]').text()).toContain('There is no such house')
-    expect(wrapper.find('[role=alert] button').exists()).toBe(false)
+    expect(wrapper.get('h1').text()).toBe('No such house')
+    expect(wrapper.find('.corner-rail').exists()).toBe(false)
+    expect(wrapper.get('.empty a').attributes('href')).toBe('/')
   })
 })

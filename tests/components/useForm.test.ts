@@ -48,6 +48,8 @@ describe('useForm', () => {
       throw refusal([{ path: 'name', code: 'taken', message: 'is taken' }])
     })
     const { form } = buildForm({ submit })
+    // As the template does.
+    form.errorOf('name')
     await form.submit()
     expect(form.errorOf('name')).toBe('is taken')
     expect(form.problem).toBe('')
