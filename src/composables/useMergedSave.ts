@@ -4,8 +4,6 @@ import type { FieldProblem } from '../../shared/schemas/problem.ts'
 import { fieldAt, withFieldAt } from './fieldPaths.ts'
 import { isSame, mergeFields, type FieldConflict } from './mergeFields.ts'
 
-export { mergeFields, type FieldConflict } from './mergeFields.ts'
-
 export interface MergedSaveOptions<Fields extends object, Saved extends { version: number }> {
   /** What a person keys of the record. */
   fieldsOf(saved: Saved): Fields
