@@ -1,4 +1,4 @@
-import { formatLength } from '../../../shared/engine/index.ts'
+import { formatLength } from '../../../shared/engine/units/formatLength.ts'
 import type { RoomFields } from '../../../shared/schemas/room.ts'
 import type { RoomDraft } from './roomDraft.ts'
 

@@ -1,4 +1,4 @@
-import { formatLength } from '../../../shared/engine/index.ts'
+import { formatLength } from '../../../shared/engine/units/formatLength.ts'
 import type { RoomUse } from '../../../shared/schemas/room.ts'
 import { ROOM_USE_TITLES } from './roomUses.ts'
 

@@ -1,4 +1,4 @@
-import { formatLength } from '../../../shared/engine/index.ts'
+import { formatLength } from '../../../shared/engine/units/formatLength.ts'
 
 /** A length as drawings give it: to the nearest sixteenth of an inch, because a wall at an angle has no end to its fraction. */
 export function drawnLength(inches: number): string {

@@ -1,4 +1,4 @@
-import type { Dimension } from '../../../shared/engine/index.ts'
+import type { Dimension } from '../../../shared/catalogue/units.ts'
 
 const UNITS: Partial<Record<Dimension, string>> = { length: 'ft', area: 'sq ft', volume: 'cu ft' }
 

@@ -1,4 +1,4 @@
-import { shapeOutline } from '../../../shared/engine/index.ts'
+import { shapeOutline } from '../../../shared/engine/geometry/shapeOutline.ts'
 import type { Corner, Shape } from '../../../shared/schemas/room.ts'
 import { walkGap, walkPoints, type WallWalk } from './wallRuns.ts'
 

@@ -1,4 +1,4 @@
-import { formatLength } from '../../../shared/engine/index.ts'
+import { formatLength } from '../../../shared/engine/units/formatLength.ts'
 import type { Corner, Deduction, Opening } from '../../../shared/schemas/room.ts'
 import { DEDUCTION_TITLES, OPENING_TITLES } from './commonSizes.ts'
 import { drawnLength } from './drawnLength.ts'

@@ -1,4 +1,5 @@
-import { checkShape, parseLength } from '../../../shared/engine/index.ts'
+import { checkShape } from '../../../shared/engine/geometry/checkShape.ts'
+import { parseLength } from '../../../shared/engine/units/parseLength.ts'
 import { NAME_MAX, NOTE_MAX } from '../../../shared/schemas/common.ts'
 import {
   OPENING_COUNT_MAX,

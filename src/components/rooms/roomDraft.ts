@@ -1,4 +1,5 @@
-import { formatLength, shapeOutline } from '../../../shared/engine/index.ts'
+import { formatLength } from '../../../shared/engine/units/formatLength.ts'
+import { shapeOutline } from '../../../shared/engine/geometry/shapeOutline.ts'
 import type { Ceiling, Deduction, Opening, RoomFields, RoomUse, Shape } from '../../../shared/schemas/room.ts'
 import { normalDegrees, walkFromCorners, type WallWalk } from './wallRuns.ts'
 

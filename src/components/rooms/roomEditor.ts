@@ -1,5 +1,5 @@
 import { computed, effectScope, reactive, watch, type ComputedRef } from 'vue'
-import type { RoomInput } from '../../../shared/engine/index.ts'
+import type { RoomInput } from '../../../shared/engine/estimateInput.ts'
 import type { Room, RoomFields, RoomPatch } from '../../../shared/schemas/room.ts'
 import { isSame } from '../../composables/mergeFields.ts'
 import { useMergedSave } from '../../composables/useMergedSave.ts'

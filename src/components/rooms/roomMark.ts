@@ -1,4 +1,5 @@
-import { roomMeasures, type RoomInput } from '../../../shared/engine/index.ts'
+import { roomMeasures } from '../../../shared/engine/takeoff/roomMeasures.ts'
+import type { RoomInput } from '../../../shared/engine/estimateInput.ts'
 import type { RoomEditor } from './roomEditor.ts'
 
 export interface RoomMark {

@@ -1,5 +1,6 @@
 import { computed, onScopeDispose, ref, watch, type Ref } from 'vue'
-import { roomMeasures, type RoomInput } from '../../../shared/engine/index.ts'
+import { roomMeasures } from '../../../shared/engine/takeoff/roomMeasures.ts'
+import type { RoomInput } from '../../../shared/engine/estimateInput.ts'
 import type { Room, RoomFields } from '../../../shared/schemas/room.ts'
 import { useRoomActions } from '../../composables/useRoomActions.ts'
 import { useRoomAdds } from '../../composables/useRoomAdds.ts'

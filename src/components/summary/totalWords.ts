@@ -1,4 +1,4 @@
-import { formatCents } from '../../../shared/engine/index.ts'
+import { formatCents } from '../../../shared/engine/money/formatMoney.ts'
 import type { LowLikelyHigh } from '../../../shared/schemas/common.ts'
 
 /**
