@@ -18,6 +18,8 @@ export { roofShares } from './takeoff/roofShares.ts'
 export { roomMeasures } from './takeoff/roomMeasures.ts'
 
 export { checkFormula, type CheckedFormula } from './formula/checkFormula.ts'
+export type { FormulaParser } from './formula/parsedNode.ts'
+export { needsNoParser } from './formula/parseFormula.ts'
 
 export { effectivePrice } from './pricing/effectivePrice.ts'
 export { regionalPrice, type RegionalPrice } from './pricing/regionalPrice.ts'
@@ -26,7 +28,7 @@ export { computeEstimate } from './estimate/computeEstimate.ts'
 export { defaultSettings } from './estimate/defaultSettings.ts'
 export type { Subtotal } from './estimate/groupSums.ts'
 export type { LineFigures } from './estimate/lineFigures.ts'
-export type { LiveEstimate } from './estimate/liveEstimate.ts'
+export { LiveEstimate } from './estimate/liveEstimate.ts'
 export { openEstimate } from './estimate/openEstimate.ts'
 export { toEstimateInput, toLineInput, toRoomInput } from './estimate/toEstimateInput.ts'
 

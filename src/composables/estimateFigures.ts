@@ -1,13 +1,19 @@
-import { openEstimate, toEstimateInput, type LineFigures } from '../../shared/engine/index.ts'
+import { LiveEstimate, toEstimateInput, type EstimateInput, type LineFigures } from '../../shared/engine/index.ts'
 import type { EstimateSettings, EstimateWhole, Line, LineFields, Totals } from '../../shared/schemas/estimate.ts'
 import type { Room } from '../../shared/schemas/room.ts'
+import { lazyFormulaParser } from './formulaParser.ts'
 import { lineInputOf, type LineRow } from './lineRow.ts'
 
 export type SubtotalKind = 'room' | 'system' | 'trade'
 
-/** The engine's running figures of the estimate on this page, and which lines its totals leave out. */
-export function createEstimateFigures(whole: EstimateWhole) {
-  const live = openEstimate(toEstimateInput(whole))
+/**
+ * The engine's running figures of the estimate on this page, and which lines its totals leave out. `onReadable` is called when formulas that had to wait for
+ * their parser can be read: then everything is to be opened again.
+ */
+export function createEstimateFigures(whole: EstimateWhole, onReadable: () => void) {
+  const parse = lazyFormulaParser(onReadable)
+  let input: EstimateInput = toEstimateInput(whole)
+  let live = new LiveEstimate(input, parse)
   const leftOut = new Set<string>()
   for (const { id } of whole.lines) note(id, live.line(id))
 
@@ -38,12 +44,20 @@ export function createEstimateFigures(whole: EstimateWhole) {
     },
 
     setSettings(settings: EstimateSettings): void {
+      input = { ...input, settings }
       live.setSettings(settings)
+    },
+
+    /** Computes all lines anew, formulas read afresh. */
+    reopen(rows: readonly LineRow[]): void {
+      const lines = rows.map(({ key, fields, previewed, book }) => lineInputOf(key, { ...fields, ...previewed }, book))
+      live = new LiveEstimate({ ...input, lines }, parse)
+      for (const row of rows) row.figures = note(row.key, live.line(row.key))
     },
 
     /** Takes in the house and rooms of a fresh read; the figures of every line may differ after it. */
     setMeasured(before: readonly Room[], fresh: EstimateWhole): void {
-      const input = toEstimateInput(fresh)
+      input = { ...toEstimateInput(fresh), settings: input.settings }
       const versions = new Map(before.map(({ id, version }) => [id, version]))
       const kept = new Set(fresh.rooms.map(({ id }) => id))
       live.setHouse(input.house)

@@ -43,7 +43,7 @@ interface ModelOptions {
  */
 export function createEstimateModel(whole: EstimateWhole, { calls, onBehind }: ModelOptions) {
   const estimateId = whole.estimate.id
-  const figures = createEstimateFigures(whole)
+  const figures = createEstimateFigures(whole, readFormulas)
   const byPosition = [...whole.lines].sort((a, b) => a.position - b.position)
   const list = createLineList(byPosition.map((line) => rowOfLine(line, figures.of(line.id))))
   const removed = new Map<string, LineRow>()
@@ -85,6 +85,12 @@ export function createEstimateModel(whole: EstimateWhole, { calls, onBehind }: M
     onState: (rows) => tell({ rows: rows.filter(({ isRemoved }) => !isRemoved), isStructural: false }),
     onIdle: catchUp,
   })
+
+  /** Formulas that had to wait for their parser count from now on. */
+  function readFormulas(): void {
+    figures.reopen(list.rows())
+    tell({ rows: list.rows(), isStructural: false })
+  }
 
   function tell(news: ModelNews): void {
     for (const listener of listeners) listener(news)
@@ -163,6 +169,7 @@ export function createEstimateModel(whole: EstimateWhole, { calls, onBehind }: M
   function preview(key: string, fields: Partial<LineFields> | null): void {
     const row = list.find(key)
     if (!row) return
+    row.previewed = fields
     figures.set(row, { ...row.fields, ...fields })
     tell({ rows: [row], isStructural: false })
   }

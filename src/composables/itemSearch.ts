@@ -36,9 +36,15 @@ export function createItemSearch<Item extends PriceItemFields>(items: readonly I
       if (cost === null) continue
       found.push({ item: entry.item, cost: cost + (system !== undefined && entry.item.system !== system ? OTHER_SYSTEM_COST : 0) })
     }
-    found.sort((a, b) => a.cost - b.cost || a.item.name.length - b.item.name.length || (a.item.name < b.item.name ? -1 : 1))
+    // Without a word to go by, the book's own order stands.
+    found.sort((a, b) => a.cost - b.cost || (wanted.length === 0 ? 0 : byName(a.item, b.item)))
     return found.slice(0, limit).map(({ item }) => item)
   }
+}
+
+/** The shorter name first: it is the closer match. */
+function byName(a: PriceItemFields, b: PriceItemFields): number {
+  return a.name.length - b.name.length || (a.name < b.name ? -1 : 1)
 }
 
 function indexItem<Item extends PriceItemFields>(item: Item): IndexedItem<Item> {

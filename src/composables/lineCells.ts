@@ -131,7 +131,8 @@ function readRoom(text: string, rooms: readonly Room[]): ReadCell {
   const wanted = text.toLowerCase()
   const isHouse = wanted === '' || wanted === 'house' || wanted === WHOLE_HOUSE.toLowerCase()
   if (isHouse) return { ok: true, patch: { roomId: null } }
-  const room = rooms.find(({ name }) => name.toLowerCase() === wanted)
+  const begun = rooms.filter(({ name }) => name.toLowerCase().startsWith(wanted))
+  const room = rooms.find(({ name }) => name.toLowerCase() === wanted) ?? (begun.length === 1 ? begun[0] : undefined)
   return room ? { ok: true, patch: { roomId: room.id } } : { ok: false, words: `\`${text}\` is no room of this house.` }
 }
 

@@ -1,5 +1,4 @@
-import type { LineFigures, LineInput } from '../../shared/engine/index.ts'
-import { effectivePrice } from '../../shared/engine/index.ts'
+import { toLineInput, type LineFigures, type LineInput } from '../../shared/engine/index.ts'
 import { lineFieldsSchema, type Line, type LineFields } from '../../shared/schemas/estimate.ts'
 import { isSame, type FieldConflict } from './mergeFields.ts'
 
@@ -29,6 +28,8 @@ export interface LineRow {
   /** As the server has it; `null` until it is there. */
   saved: LineFields | null
   book: Line['book']
+  /** Fields that are being typed and aren't kept: the figures are those of the line with them. */
+  previewed: Partial<LineFields> | null
   figures: LineFigures
   /** Taken out here, and whether the server has taken it out; both may be put back. */
   isRemoved: boolean
@@ -72,6 +73,7 @@ function rowStart(key: string, fields: LineFields, book: Line['book'], figures: 
     fields,
     saved: null,
     book,
+    previewed: null,
     figures,
     isRemoved: false,
     isRemovedAtServer: false,
@@ -84,19 +86,5 @@ function rowStart(key: string, fields: LineFields, book: Line['book'], figures: 
 
 /** What the engine computes a line from. */
 export function lineInputOf(key: string, fields: LineFields, book: Line['book']): LineInput {
-  return {
-    key,
-    roomKey: fields.roomId,
-    system: fields.system,
-    trade: fields.trade,
-    unit: fields.unit,
-    quantity: fields.quantity,
-    wastePercent: fields.wastePercent,
-    packageSize: fields.packageSize,
-    basis: fields.basis,
-    unitPriceE4: effectivePrice({ basis: fields.basis, override: fields.override, book }),
-    minimumChargeCents: fields.minimumChargeCents,
-    hoursPerUnit: fields.hoursPerUnit,
-    evidence: fields.evidence,
-  }
+  return toLineInput({ ...fields, book, id: key })
 }

@@ -22,6 +22,11 @@ export interface FinderStart {
   text: string
 }
 
+/** A search that begins where a line stands: below it, in its room, items of its house system first. */
+export function finderBelow(line: LineRow | undefined, text = ''): FinderStart {
+  return { afterKey: line?.key ?? null, roomId: line?.fields.roomId ?? null, system: line?.fields.system, text }
+}
+
 /** The one panel or dialog that is open over the estimate. */
 export type DeskPanel =
   | { kind: 'finder'; start: FinderStart }

@@ -3,6 +3,7 @@ import { onScopeDispose, shallowRef, watch, type Ref } from 'vue'
 import { addLine, estimateQuery, orderLines, removeLine, restoreLine, updateEstimate, updateLine } from '../api/estimates.ts'
 import type { EstimateWhole } from '../../shared/schemas/estimate.ts'
 import { createEstimateModel, type EstimateModel } from './estimateModel.ts'
+import { loadFormulaParser, needsFormulaParser } from './formulaParser.ts'
 import { onLiveEvent } from './useLiveEvents.ts'
 
 const calls = { addLine, updateLine, removeLine, restoreLine, orderLines, updateEstimate }
@@ -28,9 +29,10 @@ export function useEstimateModel(estimateId: Ref<string | undefined>) {
         void catchUp(queries, waiting)
         return
       }
-      const whole = await readWhole(queries, id)
+      const opened = await openModel(queries, await readWhole(queries, id))
       const isStillWanted = estimateId.value === id
-      if (isStillWanted) model.value = openModel(queries, whole)
+      if (isStillWanted) model.value = opened
+      else forget(opened)
     } catch (problem) {
       error.value = problem
     }
@@ -72,7 +74,8 @@ export function useEstimateModel(estimateId: Ref<string | undefined>) {
   return { model, error, retry: open }
 }
 
-function openModel(queries: QueryClient, whole: EstimateWhole): EstimateModel {
+async function openModel(queries: QueryClient, whole: EstimateWhole): Promise<EstimateModel> {
+  if (needsFormulaParser(whole.lines.map(({ quantity }) => quantity))) await loadFormulaParser()
   const model = createEstimateModel(whole, { calls, onBehind: () => void catchUp(queries, model) })
   kept.set(model.estimateId, model)
   return model

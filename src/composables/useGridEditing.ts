@@ -3,6 +3,7 @@ import type { LineFields } from '../../shared/schemas/estimate.ts'
 import type { GridRow } from './estimateRows.ts'
 import { clearedCell, FIELD_OF_COLUMN, keptQuantity, readCell, type CellColumn } from './lineCells.ts'
 import type { LineField, LineRow } from './lineRow.ts'
+import { loadFormulaParser } from './formulaParser.ts'
 import { isSame } from './mergeFields.ts'
 import type { EstimateDesk } from './useEstimateDesk.ts'
 
@@ -24,6 +25,7 @@ export function useGridEditing({ model, edits, say }: EstimateDesk) {
     const field = FIELD_OF_COLUMN[column.getColId() as CellColumn]
     if (data?.kind !== 'line' || field === null) return
     started = { key: data.key, field, value: data.fields[field] }
+    if (field === 'quantity') void loadFormulaParser()
     model.setEdited(data.key)
   }
 

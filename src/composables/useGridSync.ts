@@ -24,7 +24,9 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
     grid.setGridOption('rowData', rows.rows.value as GridRow[])
     if (focused === null || key === undefined) return
     const now = grid.getRowNode(key)?.rowIndex ?? null
-    if (now !== null && now !== focused.rowIndex) grid.setFocusedCell(now, focused.column)
+    // Where the focused line is gone, the focus stays where it was, on the line that moved up.
+    const goal = now ?? Math.min(focused.rowIndex, grid.getDisplayedRowCount() - 1)
+    if (now !== focused.rowIndex && goal >= 0) grid.setFocusedCell(goal, focused.column)
   }
 
   /** A cell that is being edited would begin anew. */

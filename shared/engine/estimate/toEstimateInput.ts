@@ -20,7 +20,7 @@ export function toRoomInput({ id, name, use, shape, ceiling, openings, deduction
 }
 
 /** A line's record as the engine computes it, at the price that counts. */
-export function toLineInput(line: Line): LineInput {
+export function toLineInput(line: Omit<Line, 'estimateId' | 'position' | 'version'>): LineInput {
   const { id, roomId, system, trade, unit, quantity, wastePercent, packageSize, basis, minimumChargeCents, hoursPerUnit, evidence } = line
   return {
     key: id,
