@@ -26,7 +26,8 @@ On a terminal it asks for the password; elsewhere it makes one and prints it onc
 
 /** The first admin, or another one when nobody can sign in any more. */
 await runCommand(async () => {
-  const { positionals, values } = parseArgs({ allowPositionals: true, options: { invite: { type: 'boolean' } } })
+  // What isn't an option here is taken as one more word, and so is answered with the usage.
+  const { positionals, values } = parseArgs({ allowPositionals: true, strict: false, options: { invite: { type: 'boolean' } } })
   const [emailText, nameText] = positionals
   if (!emailText || !nameText) throw new StartRefusal(USAGE)
   const email = checked(emailSchema, emailText, 'The e-mail')
