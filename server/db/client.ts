@@ -12,6 +12,14 @@ export function databaseOver(connection: BetterSqlite3.Database): Database {
   return drizzle(connection)
 }
 
+/** Which database a transaction is of. */
+const owners = new WeakMap<Queryable, Database>()
+
+/** The database behind a transaction, for statements that are prepared once for each: they run on its one connection, so inside what is open. */
+export function databaseOf(queryable: Queryable): Database {
+  return owners.get(queryable) ?? (queryable as Database)
+}
+
 /** What waits for the commit of a connection's outermost transaction. */
 const waitingActions = new WeakMap<BetterSqlite3.Database, (() => void)[]>()
 
@@ -20,7 +28,11 @@ const waitingActions = new WeakMap<BetterSqlite3.Database, (() => void)[]>()
  * The callback is synchronous: an async one would commit before its work was done.
  */
 export function inWriteTransaction<T>(db: Database, write: (tx: Transaction) => T extends Promise<unknown> ? never : T): T {
-  const run = () => db.transaction(write as (tx: Transaction) => T, { behavior: 'immediate' })
+  const owned = (tx: Transaction) => {
+    owners.set(tx, db)
+    return write(tx) as T
+  }
+  const run = () => db.transaction(owned, { behavior: 'immediate' })
   const isPartOfAnother = db.$client.inTransaction
   if (isPartOfAnother) return run()
   const actions: (() => void)[] = []

@@ -1,4 +1,5 @@
-import type { Queryable } from './client.ts'
+import { databaseOf, type Queryable } from './client.ts'
+import { placeholders, prepared } from './prepared.ts'
 import { auditEntries } from './schema/auditEntries.ts'
 
 export interface AuditEntry {
@@ -14,9 +15,26 @@ export interface AuditEntry {
   at: Date
 }
 
+const insertQuery = prepared((db) =>
+  db
+    .insert(auditEntries)
+    .values(placeholders(['at', 'actorId', 'what', 'whatId', 'action', 'before', 'after']))
+    .prepare(),
+)
+
 /** Leaves the audit row of a write. Call it in the write's own transaction, so that neither is there without the other. */
 export function recordAudit(tx: Queryable, { actorId, what, id, action, before, after, at }: AuditEntry): void {
-  tx.insert(auditEntries)
-    .values({ at: at.toISOString(), actorId, what, whatId: id, action, before: before ?? null, after: after ?? null })
-    .run()
+  insertQuery(databaseOf(tx)).run({
+    at: at.toISOString(),
+    actorId,
+    what,
+    whatId: id,
+    action,
+    before: jsonOrNull(before),
+    after: jsonOrNull(after),
+  })
+}
+
+function jsonOrNull(value: unknown): string | null {
+  return value === null || value === undefined ? null : JSON.stringify(value)
 }
