@@ -80,6 +80,16 @@ describe('RoomsView', () => {
     expect(measures.get('.missing').text()).toContain('Walls less openings')
   })
 
+  it('says when the measures stand on a height that is being retyped', async () => {
+    const { wrapper } = await openRooms([kitchen])
+    const height = wrapper.findAll('.ceiling input.control').at(0)
+
+    await height?.setValue('')
+    expect(wrapper.text()).toContain('these measures stand on the height before')
+    await height?.setValue('8-6')
+    expect(wrapper.text()).not.toContain('these measures stand on the height before')
+  })
+
   it('offers the first step while there is no room', async () => {
     const { wrapper, router } = await openRooms([])
 
