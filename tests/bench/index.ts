@@ -5,6 +5,7 @@ type Bench = () => AsyncIterable<BenchFigure> | Iterable<BenchFigure> | Promise<
 /** The benches, a file each. They run one after the other, so that none is in another's way. */
 const BENCHES: Record<string, () => Promise<Bench>> = {
   engine: async () => (await import('./engine.ts')).engineBench,
+  server: async () => (await import('./server.ts')).serverBench,
   workbook: async () => (await import('./workbook.ts')).workbookBench,
 }
 
