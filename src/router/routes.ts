@@ -78,7 +78,7 @@ const houseRoutes: NamedRoute[] = [
     name: 'estimate',
     path: 'estimate',
     component: () => import('../views/EstimateView.vue'),
-    meta: { title: 'Estimate', action: 'estimate.write', fillsWindow: true },
+    meta: { title: 'Estimate', action: 'estimate.read', fillsWindow: true },
   },
   {
     name: 'summary',

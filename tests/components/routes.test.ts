@@ -50,7 +50,7 @@ describe('with a session', () => {
     ['/', 'houses', ['admin', 'estimator', 'owner']],
     ['/houses/h1/details', 'house-details', ['admin', 'estimator']],
     ['/houses/h1/rooms', 'rooms', ['admin', 'estimator']],
-    ['/houses/h1/estimate', 'estimate', ['admin', 'estimator']],
+    ['/houses/h1/estimate', 'estimate', ['admin', 'estimator', 'owner']],
     ['/houses/h1/summary', 'summary', ['admin', 'estimator', 'owner']],
     ['/price-book', 'price-book', ['admin', 'estimator']],
     ['/people', 'people', ['admin']],

@@ -3,6 +3,8 @@ import { h, render, type AppContext, type Component } from 'vue'
 
 /** What an editor component exposes to the grid. */
 export interface ExposedEditor {
+  /** What is being edited, for a screen reader. */
+  label: string
   getValue(): unknown
   isPopup(): boolean
   /** Called once the editor stands in the page: the keyboard goes to it before the next key comes. */
@@ -31,6 +33,7 @@ export function vueCellEditor(component: Component, appContext: AppContext | nul
     }
 
     afterGuiAttached(): void {
+      this.place.closest('[role="dialog"]')?.setAttribute('aria-label', this.editor?.label ?? '')
       this.editor?.takeFocus()
     }
 
