@@ -76,6 +76,19 @@ describe('readEstimateDocument', () => {
       })
     })
 
+    it('with the rest of an evidence mark that is given in part', () => {
+      const { evidence } = read(put('settings', { evidence: { seen: { spread: 2 }, bid: { quantityPercent: 1 } } })).input.settings
+      expect(evidence).toEqual({
+        ...defaultSettings.evidence,
+        seen: { spread: 2, quantityPercent: 12 },
+        bid: { spread: 0.15, quantityPercent: 1 },
+      })
+    })
+
+    it('with no percentage where there is no sales tax', () => {
+      expect(read(put('settings', { salesTax: { rule: 'none' } })).input.settings.salesTax).toEqual({ rule: 'none', percent: 0 })
+    })
+
     it('and says no word of it in the document', () => expect(keyed.lines[0]?.note).toBe(''))
   })
 
@@ -86,7 +99,8 @@ describe('readEstimateDocument', () => {
     })
 
     it('an overhang of nothing', () => {
-      for (const none of [0, '0', `0"`, `0'`]) expect(read(put('house.overhang', none)).input.house.overhangIn).toBe(0)
+      for (const none of [0, '0', `0"`, `0'`, `0' 0"`, '0-0', '0 ft 0 in', '0.0 m', '0 mm'])
+        expect(read(put('house.overhang', none)).input.house.overhangIn).toBe(0)
     })
 
     it('polygon corners as lengths or feet, zero and below zero', () => {
@@ -108,6 +122,24 @@ describe('readEstimateDocument', () => {
           [150, 120],
           [-12, 120],
           [-24, 48],
+        ],
+      })
+    })
+
+    it('a place of zero in any notation', () => {
+      const corners = [
+        [`0' 0"`, `0'-0"`],
+        [`12'`, '-0'],
+        [`12'`, `-0' 6"`],
+        ['0 ft 0 in', '0.0'],
+      ]
+      expect(read(put('house.footprint', { kind: 'polygon', corners })).input.house.footprint).toEqual({
+        kind: 'polygon',
+        corners: [
+          [0, 0],
+          [144, 0],
+          [144, -6],
+          [0, 0],
         ],
       })
     })
@@ -236,6 +268,8 @@ describe('readEstimateDocument', () => {
       ['lines[0].room', 'attic', 'lines[0].room', 'unknown-room'],
       ['settings.contingency', { method: 'careful-figure', chance: 0.8 }, 'settings.contingency.method', 'not-available'],
       ['settings.salesTax', { rule: 'all', percent: 8 }, 'settings.salesTax.rule', 'invalid-value'],
+      ['settings.salesTax', { rule: 'materials' }, 'settings.salesTax.percent', 'invalid-type'],
+      ['settings.evidence', { seen: { spread: 2, width: 3 } }, 'settings.evidence.seen.width', 'unknown-field'],
       ['settings.permits', 450, 'settings.permits', 'invalid-type'],
       [
         'unknowns',

@@ -6,6 +6,7 @@ export function crossCheck({ rooms, lines, unknowns, inspections }: KeyedEstimat
   const roomKeys = keysOf(rooms)
   const unknownKeys = keysOf(unknowns)
   return [
+    ...tooMuchFormula(lines),
     ...Object.entries({ rooms, lines, unknowns, inspections }).flatMap(([list, things]) => repeatedKeys(list, things)),
     ...lines.flatMap(({ roomKey }, index) => {
       const isThere = roomKey === null || roomKeys.has(roomKey)
@@ -18,6 +19,16 @@ export function crossCheck({ rooms, lines, unknowns, inspections }: KeyedEstimat
       }),
     ),
   ]
+}
+
+/** Each distinct formula is parsed, which takes a thousand times longer than computing it: so much is plenty for 10,000 lines, and done in a second. */
+const FORMULA_CHARS_MAX = 500_000
+
+function tooMuchFormula(lines: KeyedEstimate['lines']): FieldProblem[] {
+  const chars = [...new Set(lines.map(({ quantity }) => quantity))].reduce((sum, { length }) => sum + length, 0)
+  if (chars <= FORMULA_CHARS_MAX) return []
+  const message = `their distinct formulas have ${chars} characters together; at most ${FORMULA_CHARS_MAX} are taken`
+  return [{ path: 'lines', code: 'too-much-formula', message }]
 }
 
 interface Keyed {

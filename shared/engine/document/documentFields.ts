@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { LENGTH_MAX_IN, LINE_MAX_CENTS, UNIT_PRICE_MAX_E4, type LowLikelyHigh } from '../../schemas/common.ts'
 import { PARTS_OF_INCH } from '../units/formatLength.ts'
-import { parseLength } from '../units/parseLength.ts'
+import { isZeroLength, parseLength } from '../units/parseLength.ts'
 
 type Read<T> = { value: T } | { code: string; message: string }
 
@@ -54,16 +54,15 @@ function readFeet(feet: number): Read<number> {
 }
 
 function readPlace(value: unknown): Read<number> {
-  if (isZero(value)) return { value: 0 }
   const isBelow = typeof value === 'number' ? value < 0 : typeof value === 'string' && /^\s*[-−]/.test(value)
-  if (!isBelow) return readLength(value)
-  const read = readLength(typeof value === 'number' ? -value : String(value).replace(/^\s*[-−]\s*/, ''))
-  return 'value' in read ? { value: -read.value } : read
+  const distance = !isBelow ? value : typeof value === 'number' ? -value : String(value).replace(/^\s*[-−]\s*/, '')
+  if (isZero(distance)) return { value: 0 }
+  const read = readLength(distance)
+  return isBelow && 'value' in read ? { value: -read.value } : read
 }
 
-/** `0`, `"0"`, `"0'"`, `0 in` … */
 function isZero(value: unknown): boolean {
-  return value === 0 || (typeof value === 'string' && /^\s*0+(?:\.0+)?\s*(?:['"′″’”]|ft|in|m|cm|mm)?\s*$/i.test(value))
+  return value === 0 || (typeof value === 'string' && isZeroLength(value))
 }
 
 function hold(inches: number): number {

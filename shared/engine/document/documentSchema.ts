@@ -11,7 +11,7 @@ import { inspectionDocument, unknownDocument } from './unknownDocument.ts'
 export const DOCUMENT_FORMAT = 'quoinbook.estimate'
 export const DOCUMENT_VERSION = 1
 
-const ROOMS_MAX = 1000
+const ROOMS_MAX = 250
 const UNKNOWNS_MAX = 500
 
 /** An estimate document read: lengths in inches, money in whole cents and ten-thousandths of a dollar, defaults filled in. */

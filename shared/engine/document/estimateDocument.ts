@@ -109,11 +109,12 @@ export interface DocumentInspection {
 
 export interface DocumentSettings {
   overheadAndProfitPercent?: number
-  salesTax?: EstimateSettings['salesTax']
+  /** Without tax there is no percentage to give. */
+  salesTax?: { rule: 'none'; percent?: number } | EstimateSettings['salesTax']
   permits?: DocumentMoney
   contingency?: { method: 'percent'; percent: number } | { method: 'fixed'; amount: DocumentMoney }
   ends?: EstimateSettings['ends']
-  evidence?: Partial<EstimateSettings['evidence']>
+  evidence?: Partial<Record<Evidence, Partial<EstimateSettings['evidence'][Evidence]>>>
   correlation?: Partial<EstimateSettings['correlation']>
   draws?: number
 }

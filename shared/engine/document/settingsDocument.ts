@@ -20,15 +20,29 @@ const contingencyDocument = z.discriminatedUnion(
   { error: noSuch('method', 'percent, fixed') },
 )
 
+/** Where there is no tax there is no percentage to give. */
+const salesTaxDocument = z
+  .strictObject({ rule: fields.salesTax.shape.rule, percent: percentSchema.optional() })
+  .superRefine(({ rule, percent }, context) => {
+    if (rule !== 'none' && percent === undefined)
+      context.addIssue({ code: 'custom', path: ['percent'], message: 'is missing', params: { code: 'invalid-type' } })
+  })
+  .transform(({ rule, percent }): EstimateSettings['salesTax'] => ({ rule, percent: percent ?? 0 }))
+
+const { seen, measured, tested, bid } = fields.evidence.shape
+const evidenceDocument = z
+  .strictObject({ seen: seen.partial(), measured: measured.partial(), tested: tested.partial(), bid: bid.partial() })
+  .partial()
+
 /** The settings of a document over the firm's defaults: whatever is left out takes theirs. */
 export const settingsDocument = z
   .strictObject({
     overheadAndProfitPercent: fields.overheadAndProfitPercent.optional(),
-    salesTax: fields.salesTax.optional(),
+    salesTax: salesTaxDocument.optional(),
     permits: amountField.optional(),
     contingency: contingencyDocument.optional(),
     ends: fields.ends.optional(),
-    evidence: fields.evidence.partial().optional(),
+    evidence: evidenceDocument.optional(),
     correlation: fields.correlation.partial().optional(),
     draws: fields.draws.optional(),
   })
@@ -38,10 +52,20 @@ export const settingsDocument = z
     permitsCents: permits ?? defaultSettings.permitsCents,
     contingency: contingencyOf(contingency),
     ends: ends ?? defaultSettings.ends,
-    evidence: { ...defaultSettings.evidence, ...evidence },
+    evidence: evidenceOf(evidence),
     correlation: { ...defaultSettings.correlation, ...correlation },
     draws: draws ?? defaultSettings.draws,
   }))
+
+function evidenceOf(keyed: z.output<typeof evidenceDocument> = {}): EstimateSettings['evidence'] {
+  const { evidence } = defaultSettings
+  return {
+    seen: { ...evidence.seen, ...keyed.seen },
+    measured: { ...evidence.measured, ...keyed.measured },
+    tested: { ...evidence.tested, ...keyed.tested },
+    bid: { ...evidence.bid, ...keyed.bid },
+  }
+}
 
 function contingencyOf(keyed: z.output<typeof contingencyDocument> | undefined): EstimateSettings['contingency'] {
   if (keyed?.method === 'percent') return keyed

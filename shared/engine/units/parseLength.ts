@@ -28,8 +28,7 @@ const METRIC = new RegExp(String.raw`^(${DECIMAL}) ?(mm|cm|m|millimet(?:er|re)s?
 export function parseLength(text: string): ParsedLength {
   if (text.length > LENGTH_TEXT_MAX)
     return { ok: false, message: `${quoted(text)} is too long for a length. Write \`12' 6"\` or \`12.5\`.` }
-  const plain = withDecimalPoint(plainNotation(text))
-  const inches = plain === null ? null : readInches(plain)
+  const inches = inchesIn(text)
   if (inches === null || !Number.isFinite(inches)) return { ok: false, message: explainLength(text) }
   if (inches === 0) return { ok: false, message: `${quoted(text)} is zero. A length is more than zero: write \`12' 6"\` or \`12.5\`.` }
   const held = Math.round(inches * PARTS_OF_INCH) / PARTS_OF_INCH
@@ -37,6 +36,16 @@ export function parseLength(text: string): ParsedLength {
   if (held > LENGTH_MAX_IN)
     return { ok: false, message: `${quoted(text)} is longer than half a mile. A bare number is feet: write \`12' 6"\` or \`12.5\`.` }
   return { ok: true, inches: held }
+}
+
+/** Whether a text says zero, in any notation of a length: `0`, `0' 0"`, `0 m`. No length is zero, but a place on a plan may be. */
+export function isZeroLength(text: string): boolean {
+  return text.length <= LENGTH_TEXT_MAX && inchesIn(text) === 0
+}
+
+function inchesIn(text: string): number | null {
+  const plain = withDecimalPoint(plainNotation(text))
+  return plain === null ? null : readInches(plain)
 }
 
 /** `3,81` → `3.81`. `1,250` could be either, so it is `null`. */
