@@ -6,7 +6,15 @@ import { buildPriceItem } from '../support/buildPriceItem.ts'
 
 const plank = buildPriceItem()
 const paint = buildPriceItem({ key: 'walls/paint', name: 'Wall paint' })
-const region = { key: 'merrow-harbor', name: 'Merrow Harbor', materialsFactor: 1, laborFactor: 1.1, salesTaxRule: 'materials', salesTaxPercent: 8, rowVersion: 1 } as const
+const region = {
+  key: 'merrow-harbor',
+  name: 'Merrow Harbor',
+  materialsFactor: 1,
+  laborFactor: 1.1,
+  salesTaxRule: 'materials',
+  salesTaxPercent: 8,
+  rowVersion: 1,
+} as const
 
 describe('itemChanges', () => {
   it('names what was added, changed and dropped, with both figures', () => {
@@ -36,7 +44,13 @@ describe('itemChanges', () => {
 describe('regionChanges', () => {
   it('names the factors that differ', () => {
     expect(regionChanges([region], [{ ...region, laborFactor: 1.15, rowVersion: 2 }])).toEqual([
-      { kind: 'changed', key: region.key, name: region.name, regionName: null, fields: [{ title: 'Labor factor', before: '1.1', after: '1.15' }] },
+      {
+        kind: 'changed',
+        key: region.key,
+        name: region.name,
+        regionName: null,
+        fields: [{ title: 'Labor factor', before: '1.1', after: '1.15' }],
+      },
     ])
   })
 })

@@ -18,7 +18,8 @@ function fakeDraft(rows: PriceItem[]) {
       const refusal = refusals.shift()
       if (refusal) throw refusal
       const row = held.get(key)
-      if (!row || row.rowVersion !== rowVersion) throw new ProblemError({ status: 412, code: 'stale', detail: 'Somebody was quicker.', current: row })
+      if (!row || row.rowVersion !== rowVersion)
+        throw new ProblemError({ status: 412, code: 'stale', detail: 'Somebody was quicker.', current: row })
       const saved = { ...row, ...patch, rowVersion: rowVersion + 1 }
       held.set(key, saved)
       return saved
@@ -126,7 +127,10 @@ describe('createDraftEditor', () => {
     editor.take('merrow-harbor', [plank])
     await editor.key(HARBOR, 'installed.likely', '6.10')
     expect(calls.update).not.toHaveBeenCalled()
-    expect(calls.add).toHaveBeenCalledWith({ ...fieldsOf(plank), installed: { low: 48_000, likely: 61_000, high: 72_500 } }, 'merrow-harbor')
+    expect(calls.add).toHaveBeenCalledWith(
+      { ...fieldsOf(plank), installed: { low: 48_000, likely: 61_000, high: 72_500 } },
+      'merrow-harbor',
+    )
     expect(editor.rowOf(HARBOR)?.isRegionsOwn).toBe(true)
     expect(editor.rowOf(BASE)?.installed?.likely).toBe(58_000)
     await editor.undo()

@@ -3,7 +3,14 @@ import { itemMatcher } from '../../src/components/price-book/itemMatcher.ts'
 import { buildPriceItem } from '../support/buildPriceItem.ts'
 
 const plank = buildPriceItem()
-const paint = buildPriceItem({ key: 'walls/paint', name: 'Wall paint, two coats', system: 'walls', trade: 'painting', note: 'Señor blue', packageName: 'gallon' })
+const paint = buildPriceItem({
+  key: 'walls/paint',
+  name: 'Wall paint, two coats',
+  system: 'walls',
+  trade: 'painting',
+  note: 'Señor blue',
+  packageName: 'gallon',
+})
 
 function found(search: string, system: string | null = null): string[] {
   return [plank, paint].filter(itemMatcher({ search, system })).map(({ key }) => key)

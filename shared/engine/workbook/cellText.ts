@@ -4,6 +4,8 @@ export const CELL_TEXT_MAX = 32_767
 export const CELL_LINE_FEEDS_MAX = 253
 
 const FORMULA_STARTS = new Set(['=', '+', '-', '@', '\t', '\r'])
+/** Most texts are such: they need no second look. */
+const PLAIN = /^[ -~]*$/
 /** Control characters that XML 1.0 can't hold, and halves of surrogate pairs. */
 const UNWRITABLE = /(?![\t\n])\p{Cc}|\p{Surrogate}|[\uFFFE\uFFFF]/gu
 
@@ -12,6 +14,7 @@ const UNWRITABLE = /(?![\t\n])\p{Cc}|\p{Surrogate}|[\uFFFE\uFFFF]/gu
  * ("Excel specifications and limits"). Never cuts a surrogate pair in two.
  */
 export function cellText(text: string): string {
+  if (text.length <= CELL_TEXT_MAX && PLAIN.test(text)) return text
   // XML readers turn a carriage return into a line feed anyway; done here, the stored text is the read text.
   const writable = text.replace(/\r\n?/g, '\n').replace(UNWRITABLE, '')
   const parts = writable.split('\n')

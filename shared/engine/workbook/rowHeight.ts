@@ -68,6 +68,7 @@ function lettersPerDigit(style: StyleName): number {
 
 function linesOf(text: string, width: number): number {
   const perLine = Math.max(1, Math.floor(width))
+  if (text.length <= perLine && !text.includes('\n')) return 1
   return text.split('\n').reduce((sum, paragraph) => sum + wrappedLines(paragraph, perLine), 0)
 }
 

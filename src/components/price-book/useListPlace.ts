@@ -16,7 +16,8 @@ export function useListPlace(openKey: () => string | null): void {
     if (key === null && before !== null) {
       await nextTick()
       window.scrollTo(0, scrolledTo)
-      document.querySelector<HTMLElement>(`[data-key="${CSS.escape(before)}"]`)?.focus({ preventScroll: true })
+      const opened = [...document.querySelectorAll<HTMLElement>('[data-key]')].find(({ dataset }) => dataset.key === before)
+      opened?.focus({ preventScroll: true })
     }
   })
 }

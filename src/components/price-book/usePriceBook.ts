@@ -84,9 +84,10 @@ export function usePriceBook() {
   const items = computed(() => (isEditing.value ? editor.value.rows(regionKey.value) : (itemsRead.data.value ?? [])))
   const matches = computed(() => itemMatcher({ search: search.value, system: address.system.value }))
   const shownItems = computed(() => items.value.filter(matches.value))
-  const itemsBefore = computed(() =>
-    itemsBeforeRead.data.value ? new Map(itemsBeforeRead.data.value.map((item) => [item.key, item])) : null,
-  )
+  const itemsBefore = computed(() => {
+    const list = shown.value?.status === 'draft' ? itemsBeforeRead.data.value : undefined
+    return list ? new Map(list.map((item) => [item.key, item])) : null
+  })
   const rowOf = createRowMaker()
   const rows = computed<GridRow[]>(() =>
     items.value.map((item) => {
