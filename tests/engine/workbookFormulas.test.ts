@@ -68,6 +68,7 @@ describe('a translated formula', () => {
   rooms.forEach((room, index) => measureRoom(room, roomValues, roomRows[index]))
   const ofHouse = houseMeasures(buildHouse(), rooms)
   const houseValues = Float64Array.from(HOUSE_MEASURES, ({ name }) => (ofHouse[name]?.ok ? ofHouse[name].value : NaN))
+  const columns = { roomValues, roomRows, houseValues, roomsStamp: 0 }
   const names = [
     ...rooms.flatMap((room, index) =>
       Object.entries(roomMeasures(room)).map(([name, value]) => [roomMeasureName(index + 1, name), value] as const),
@@ -86,7 +87,7 @@ describe('a translated formula', () => {
     return sheet.getCellValue({ sheet: 0, row: 0, col: 0 })
   }
   function inEngine(text: string): number {
-    return compileFormula(parsed(text), { roomValues, roomRows, houseValues })(roomRows[KITCHEN - 1] ?? 0)
+    return compileFormula(parsed(text), columns)(roomRows[KITCHEN - 1] ?? 0)
   }
 
   const leaf = fc.oneof(

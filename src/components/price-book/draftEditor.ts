@@ -27,8 +27,6 @@ interface Step {
 
 const STEPS_MAX = 100
 
-export type DraftEditor = ReturnType<typeof createDraftEditor>
-
 /**
  * The draft while it is edited: rows as the server has them with what is still on its way laid over them, cells that can't be saved as they were
  * keyed, and the steps that can be undone. Saves of one item go one after the other, each against the version that the one before left.
