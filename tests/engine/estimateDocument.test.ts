@@ -290,6 +290,16 @@ describe('readEstimateDocument', () => {
       ])
     })
 
+    it('more formula than can be parsed in a moment', () => {
+      const [line] = buildEstimateDocument().lines
+      const lines = Array.from({ length: 1100 }, (_, index) => ({
+        ...line!,
+        key: `line-${index}`,
+        quantity: `${index} + ${'1'.repeat(490)}`,
+      }))
+      expect(problems(buildEstimateDocument({ lines }))).toMatchObject([{ path: 'lines', code: 'too-much-formula' }])
+    })
+
     it('the careful figure, and says which contingencies are available', () => {
       expect(problems(put('settings.contingency', { method: 'careful-figure', chance: 0.8 }))[0]?.message).toMatch(
         /percent and fixed are available/,

@@ -11,7 +11,7 @@ import { buildRoomInput } from './buildEngineInput.ts'
 export function evaluateFormula(text: string, room: RoomInput = buildRoomInput()): number {
   const roomValues = new Float64Array(ROOM_MEASURE_COUNT)
   measureRoom(room, roomValues)
-  const columns = { roomValues, roomRows: [0], houseValues: new Float64Array(HOUSE_MEASURES.length).fill(NaN) }
+  const columns = { roomValues, roomRows: [0], roomsStamp: 0, houseValues: new Float64Array(HOUSE_MEASURES.length).fill(NaN) }
   return compileFormula(parseFormula(text, 'room', mathjsParse), columns)(0)
 }
 

@@ -32,6 +32,7 @@ export class LiveEstimate {
   private readonly columns: FormulaColumns = {
     roomValues: new Float64Array(16 * ROOM_MEASURE_COUNT),
     roomRows: [],
+    roomsStamp: 0,
     houseValues: new Float64Array(HOUSE_MEASURES.length).fill(NaN),
   }
   private readonly rooms = new RoomTable(this.columns)

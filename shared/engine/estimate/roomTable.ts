@@ -37,6 +37,7 @@ export class RoomTable {
     if (place.measured) place.measured.room = room
     else place.measured = this.add(room)
     measureRoom(room, this.columns.roomValues, place.measured.row)
+    this.columns.roomsStamp += 1
     return place
   }
 
@@ -49,6 +50,7 @@ export class RoomTable {
     this.columns.roomRows.splice(index, 1)
     this.freeRows.push(place.measured.row)
     place.measured = null
+    this.columns.roomsStamp += 1
     return place
   }
 

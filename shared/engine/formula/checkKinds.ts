@@ -107,15 +107,16 @@ function commonKind(nodes: readonly FormulaNode[]): Quantity {
 
 /**
  * Refuses a formula that counts something else than its item is priced by: sq ft for an item by the lineal foot. What was divided by a literal may be a count, or the larger unit that
- * the division makes: ceil(wall_area / 32) sheets, roof_area / 100 squares, floor_area * 0.33 / 27 cubic yards.
+ * the division makes: ceil(wall_area / 32) sheets, roof_area / 100 squares, floor_area * 0.33 / 27 cubic yards. What was multiplied by one may be a count: roof_squares * 3 bundles.
  *
  * @throws FormulaError
  */
 export function checkUnit(kind: Quantity, unit: Unit, text: string): void {
   const power = POWERS[unit.dimension]
   const isSame = kind.power === power && kind.size === unit.size
+  const isRated = kind.fits === 'rated' && power === 0
   const isConverted = kind.fits === 'divided' && (power === 0 || (unit.size !== 1 && kind.power <= power))
-  if (kind.fits === 'any' || isSame || isConverted) return
+  if (kind.fits === 'any' || isSame || isRated || isConverted) return
   throw new FormulaError('unit-mismatch', `This formula gives ${kindWords(kind)}; the item is priced per ${unit.key}.${hint(kind, unit)}`, [
     0,
     text.length,

@@ -121,11 +121,21 @@ function compileCall({ name, args }: NodeOf<'call'>, columns: FormulaColumns): E
 
 function compileSum({ argument }: NodeOf<'sum-rooms'>, columns: FormulaColumns): Evaluate {
   const each = compileFormula(argument, columns)
+  let sum = NaN
+  let summedAt = -1
+  // The same for every line: summed once after each change of a room, however many lines ask.
   return () => {
-    const { roomRows } = columns
-    if (roomRows.length === 0) return NaN
-    let sum = 0
-    for (const row of roomRows) sum += each(row)
+    if (summedAt !== columns.roomsStamp) {
+      sum = sumOver(columns.roomRows, each)
+      summedAt = columns.roomsStamp
+    }
     return sum
   }
+}
+
+function sumOver(rows: readonly number[], each: Evaluate): number {
+  if (rows.length === 0) return NaN
+  let sum = 0
+  for (const row of rows) sum += each(row)
+  return sum
 }

@@ -8,6 +8,8 @@ export interface FormulaColumns {
   roomValues: Float64Array
   /** Where the row of each room begins. */
   roomRows: number[]
+  /** Goes up with every change of a room: what was summed over rooms before is stale. */
+  roomsStamp: number
   houseValues: Float64Array
 }
 

@@ -1,5 +1,7 @@
 import { exactly, LITERAL, type Quantity } from './kinds.ts'
 
+const STRICTNESS: Record<Quantity['fits'], number> = { any: 0, divided: 1, rated: 2, exactly: 3 }
+
 /**
  * What two parts give together where they must be of one kind: sums, comparisons, min, max, the two ends of a condition. `null`: they don't go together.
  * Two measures that were each divided by a literal can both be counts: sheets and sticks.
@@ -7,7 +9,7 @@ import { exactly, LITERAL, type Quantity } from './kinds.ts'
 export function together(left: Quantity, right: Quantity): Quantity | null {
   if (left.fits === 'any') return right
   if (right.fits === 'any') return left
-  if (left.power === right.power && left.size === right.size) return left.fits === 'divided' ? right : left
+  if (left.power === right.power && left.size === right.size) return STRICTNESS[right.fits] > STRICTNESS[left.fits] ? right : left
   if (left.fits === 'divided' && right.fits === 'divided') return exactly(0)
   if (left.fits === 'divided') return fitsDivided(left, right) ? right : null
   if (right.fits === 'divided') return fitsDivided(right, left) ? left : null
@@ -27,7 +29,8 @@ export function times(left: Quantity, right: Quantity): Quantity {
 }
 
 function timesLiteral(measure: Quantity): Quantity {
-  return measure.power === 0 ? LITERAL : measure
+  if (measure.power === 0) return LITERAL
+  return measure.fits === 'exactly' ? { ...measure, fits: 'rated' } : measure
 }
 
 export function over(left: Quantity, right: Quantity): Quantity {

@@ -4,13 +4,13 @@ import type { Dimension } from '../../catalogue/units.ts'
  * What a part of a formula counts. `power` of the foot: 0 a count, 1 a length, 2 an area, 3 a volume. `size`: how many base units one of it holds, 100 for roof squares.
  *
  * `fits` says how strictly: `exactly` that; `any`, as a literal does, which may stand for feet or square feet alike; `divided`, a measure divided by a literal, which may as well be
- * a count (sheets of 32) or a larger unit (squares, cubic yards).
+ * a count (sheets of 32) or a larger unit (squares, cubic yards); `rated`, a measure times a literal, which an item that is counted takes for so many of it (3 bundles a square).
  */
 export interface Quantity {
   kind: 'quantity'
   power: number
   size: number
-  fits: 'exactly' | 'divided' | 'any'
+  fits: 'exactly' | 'divided' | 'rated' | 'any'
 }
 
 /** A comparison's answer. */
