@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { checkFormula } from '../../shared/engine/index.ts'
-import { UNITS } from '../../shared/catalogue/units.ts'
+import { findUnit, UNITS } from '../../shared/catalogue/units.ts'
 
 const inRoom = (text: string, unit: string) => checkFormula(text, { scope: 'room', unit })
 const inHouse = (text: string, unit: string) => checkFormula(text, { scope: 'house', unit })
@@ -30,7 +30,24 @@ describe('the unit of a formula', () => {
     for (const { key } of UNITS) expect(inHouse('180', key)).toEqual({ ok: true, dimension: 'any' })
   })
 
-  it.each(['SF', 'sq ft', 'Sq Ft', 'ft2'])('may be spelled %s', (unit) => expect(inRoom('floor_area', unit).ok).toBe(true))
+  it.each(['SF', 'sq ft', 'Sq. Ft.', 's.f.', 'ft2', 'ft²', 'square foot', 'square  feet'])('may be spelled %s', (unit) =>
+    expect(inRoom('floor_area', unit).ok).toBe(true),
+  )
+
+  it.each(['lineal feet', 'linear feet', 'lin. ft.', 'feet'])('may be spelled %s', (unit) =>
+    expect(inRoom('perimeter', unit).ok).toBe(true),
+  )
+
+  it.each(['bundle', 'rolls', 'box', 'BF', 'bags', 'pair', 'qt', 'lbs', 'fixture', 'visit', 'allowance'])(
+    'may be what the trade counts, as %s',
+    (unit) => expect(inHouse('12', unit).ok).toBe(true),
+  )
+
+  it('has no spelling that means two of them', () => {
+    for (const unit of UNITS) {
+      for (const spelling of [unit.key, unit.name, unit.plural, ...unit.aliases]) expect(findUnit(spelling)?.key).toBe(unit.key)
+    }
+  })
 
   it('that nobody knows is refused', () => {
     expect(inRoom('floor_area', 'parsec')).toMatchObject({ ok: false, code: 'unknown-unit' })
@@ -98,6 +115,22 @@ describe('the unit of a formula', () => {
     it('is still what it was beside a measure', () => {
       expect(refusal(inRoom('wall_area / 2 + perimeter', 'sf'))).toMatch(/mixes/)
       expect(refusal(inRoom('floor_area / 2', 'lf'))).toMatch(/gives sq ft/)
+    })
+  })
+
+  describe('of what is multiplied by a literal', () => {
+    it('may be so many for each of it, where the item is counted', () => {
+      expect(inHouse('ceil(roof_squares * 3)', 'bundle')).toEqual({ ok: true, dimension: 'area' })
+      expect(inRoom('0.004 * wall_area', 'gal').ok).toBe(true)
+      expect(inRoom('base_length * 0.75 + base_length * 2', 'each').ok).toBe(true)
+    })
+
+    it('is still what it was for anything else', () => {
+      expect(refusal(inRoom('floor_area * 2', 'lf'))).toMatch(/gives sq ft/)
+      expect(refusal(inHouse('roof_squares * 3', 'sf'))).toMatch(/gives squares/)
+      expect(refusal(inRoom('floor_area * 2 + wall_area', 'each'))).toMatch(/gives sq ft/)
+      expect(refusal(inRoom('wall_area + floor_area * 2', 'each'))).toMatch(/gives sq ft/)
+      expect(refusal(inRoom('floor_area * 2 + perimeter', 'each'))).toMatch(/mixes/)
     })
   })
 
