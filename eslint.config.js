@@ -30,12 +30,16 @@ export default tseslint.config(
   },
   {
     files: ['shared/**/*.ts'],
-    rules: refuse(['^(?!\\.{1,2}/|zod$|mathjs)'], 'shared imports nothing but zod and the parser of mathjs'),
+    rules: refuse(['^(?!\\.{1,2}/|zod$|#?mathjs)'], 'shared imports nothing but zod and the parser of mathjs'),
   },
   {
     files: ['shared/**/*.ts'],
     ignores: ['shared/engine/formula/**'],
     rules: refuse(['^(?!\\.{1,2}/|zod$)'], 'only shared/engine/formula may import mathjs'),
+  },
+  {
+    files: ['shared/engine/formula/mathjsInNode.ts'],
+    rules: refuse(['^(?!node:module$|mathjs)'], 'this file loads mathjs and nothing else'),
   },
   {
     files: ['src/**/*.{ts,vue}'],

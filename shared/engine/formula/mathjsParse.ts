@@ -1,4 +1,4 @@
-import { create, parseDependencies } from 'mathjs/number'
+import { loadMathjs } from '#mathjs'
 import type { FormulaParser } from './parsedNode.ts'
 
 let parse: FormulaParser | null = null
@@ -8,6 +8,11 @@ let parse: FormulaParser | null = null
  * A module of its own, so that a page which computes no formula loads none of it.
  */
 export const mathjsParse: FormulaParser = (text) => {
-  parse ??= create({ ...parseDependencies }).parse as FormulaParser
+  parse ??= makeParser()
   return parse(text)
+}
+
+function makeParser(): FormulaParser {
+  const { create, parseDependencies } = loadMathjs()
+  return create({ ...parseDependencies }).parse as FormulaParser
 }
