@@ -31,6 +31,7 @@ import { workbookOperations } from './features/workbook/workbookRoutes.ts'
 import { createWorkbookService } from './features/workbook/workbookService.ts'
 import { apiRouter } from './http/apiRouter.ts'
 import type { Operation } from './http/operation.ts'
+import { REACHED_BY_HTTPS } from './http/sessionCookie.ts'
 import type { MailSender } from './mail/mailSender.ts'
 import { compressResponses } from './middleware/compressResponses.ts'
 import { errorHandler } from './middleware/errorHandler.ts'
@@ -100,8 +101,10 @@ export function buildApp(parts: AppParts): BuiltApp {
   app.set('etag', false)
   app.set('query parser', 'simple')
   app.set('trust proxy', config.trustProxy)
+  const isHttps = config.appUrl.startsWith('https:')
+  app.set(REACHED_BY_HTTPS, isHttps)
   app.use(requestLog(logger))
-  app.use(securityHeaders({ isHttps: config.appUrl.startsWith('https:') }))
+  app.use(securityHeaders({ isHttps }))
   app.use(compressResponses())
   app.use(
     '/api',

@@ -77,6 +77,17 @@ describe('POST /api/sessions', () => {
     })
   })
 
+  describe('of an app whose address is an https one', () => {
+    it('marks the cookie Secure also where the proxy does not say so, and reads it back', async () => {
+      app = buildTestApp({ appUrl: 'https://quoinbook.example' })
+      const user = buildUser(app.db)
+      const answer = await signIn(user.email)
+      expect(cookieOf(answer)).toMatch(/^__Host-quoinbook_session=.*; Path=\/; .*HttpOnly; Secure; SameSite=Lax$/)
+      const [pair = ''] = cookieOf(answer).split(';')
+      expect((await app.anonymous().get('/api/sessions/current').set('Cookie', pair)).status).toBe(200)
+    })
+  })
+
   describe('when it fails', () => {
     it('reads the same for a wrong password, an unknown address, an open invitation and a deactivated account', async () => {
       const active = buildUser(app.db)
