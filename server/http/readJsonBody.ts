@@ -4,6 +4,9 @@ import { AppError } from '../errors/AppError.ts'
 /** Largest body that a call takes unless it says otherwise, in bytes. */
 const BODY_LIMIT_BYTES = 1_000_000
 
+/** Lists and objects inside one another; an estimate document has eight. What takes a value apart by recursion is safe below it. */
+const NESTING_MAX = 64
+
 const parsers = new Map<number, RequestHandler>()
 
 /** One parser a limit: they hold no state of a request. */
@@ -14,7 +17,7 @@ function parserFor(limit: number): RequestHandler {
 }
 
 /**
- * Reads the JSON body of a request. Throws 415 for another content type, 400 for a missing or malformed body, 413 over the limit.
+ * Reads the JSON body of a request. Throws 415 for another content type, 400 for a missing or malformed body or one that nests without end, 413 over the limit.
  * Read after the guards, so that nobody's 50 MB are taken in before it is known who sends them.
  */
 export async function readJsonBody(req: Request, res: Response, limit = BODY_LIMIT_BYTES): Promise<unknown> {
@@ -27,7 +30,15 @@ export async function readJsonBody(req: Request, res: Response, limit = BODY_LIM
   await new Promise<void>((resolve, reject) => {
     parserFor(limit)(req, res, (error: unknown) => (error ? reject(asRefusal(error, limit)) : resolve()))
   })
+  if (nestsDeeper(req.body, NESTING_MAX)) {
+    throw new AppError({ status: 400, code: 'nested-too-deep', detail: `The body nests more than ${NESTING_MAX} lists and objects.` })
+  }
   return req.body as unknown
+}
+
+function nestsDeeper(value: unknown, levels: number): boolean {
+  if (typeof value !== 'object' || value === null) return false
+  return levels === 0 || Object.values(value).some((part) => nestsDeeper(part, levels - 1))
 }
 
 /** The parser's own errors in our words. */
