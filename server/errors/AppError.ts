@@ -59,7 +59,9 @@ export function invalid(errors: FieldProblem[]): AppError {
 }
 
 function sentence({ path, message }: FieldProblem): string {
-  return path === '' ? `What was sent ${message}.` : `${path}: ${message}.`
+  const words = path === '' ? `What was sent ${message}` : `${path}: ${message}`
+  // The engine's messages are sentences of their own.
+  return words.endsWith('.') ? words : `${words}.`
 }
 
 /** 401: nobody is signed in, or no longer. */

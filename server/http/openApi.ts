@@ -83,14 +83,16 @@ function parametersOf({ path, params, query, ifMatch, method, action, headers = 
   ]
 }
 
-function responsesOf({ status = 200, response, produces, action, body, params, ifMatch }: Operation): Json {
+function responsesOf({ status = 200, method, response, produces, action, body, params, ifMatch }: Operation): Json {
   const mediaType = produces ?? 'application/json'
-  const content =
-    response || produces ? { content: { [mediaType]: { schema: response ? jsonSchema(response, 'output') : { type: 'string' } } } } : {}
+  const content = response || produces ? { content: { [mediaType]: { schema: answerSchema(response, mediaType) } } } : {}
   const refusals = [
     ...(action === 'public' ? [] : [401, 403]),
     ...(params ? [404] : []),
-    ...(body ? [400, 413, 415] : []),
+    ...(body || ifMatch ? [400] : []),
+    ...(body ? [413, 415] : []),
+    // A rule can stand against any write, and a repeated one may still be worked on.
+    ...(action === 'public' || method === 'get' ? [] : [409]),
     ...(ifMatch ? [412, 428] : []),
     ...(body || params ? [422] : []),
     429,
@@ -98,7 +100,13 @@ function responsesOf({ status = 200, response, produces, action, body, params, i
   return {
     [String(status)]: { description: status === 204 ? 'Done.' : 'The answer.', ...content },
     ...Object.fromEntries(refusals.map((refusal) => [String(refusal), { $ref: '#/components/responses/Problem' }])),
+    default: { $ref: '#/components/responses/Problem' },
   }
+}
+
+function answerSchema(response: z.ZodType | undefined, mediaType: string): Json {
+  if (response) return jsonSchema(response, 'output')
+  return mediaType.startsWith('text/') ? { type: 'string' } : { type: 'string', format: 'binary' }
 }
 
 /** What JSON Schema can't say (a check by code) is left open rather than refused. */

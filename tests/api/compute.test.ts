@@ -97,6 +97,19 @@ describe('POST /api/compute', () => {
     expect(answer.body.errors[0].path.startsWith(path)).toBe(true)
   })
 
+  it('refuses a field named __proto__ by its name, as any other that it does not know', async () => {
+    const text = JSON.stringify(DOCUMENT).replace('{', '{"__proto__":{"isAdmin":true},')
+    const answer = await estimator.agent.post('/api/compute').set('Content-Type', 'application/json').send(text)
+    expect(answer.status).toBe(422)
+    expect(answer.body.errors).toEqual([{ path: '__proto__', code: 'unknown-field', message: 'is not a known field' }])
+  })
+
+  it.each([[[]], ['text'], [[DOCUMENT]]])('refuses %j, which is no object', async (body) => {
+    const answer = await estimator.agent.post('/api/compute').set('Content-Type', 'application/json').send(JSON.stringify(body))
+    expect(answer.status).toBeGreaterThanOrEqual(400)
+    expect(answer.status).toBeLessThan(500)
+  })
+
   it('keeps nothing', async () => {
     await compute(DOCUMENT)
     expect((await estimator.agent.get('/api/houses')).body).toEqual([])

@@ -16,6 +16,12 @@ interface Description {
   components: { schemas: Record<string, object>; responses: Record<string, object>; securitySchemes: Record<string, object> }
 }
 
+interface DocumentDescription {
+  required: string[]
+  additionalProperties: boolean
+  properties: Record<string, { items?: { properties: Record<string, object> } }>
+}
+
 const app = buildTestApp()
 const description = (await app.anonymous().get('/api/openapi.json')).body as Description
 const calls = Object.entries(description.paths).flatMap(([path, methods]) =>
@@ -33,6 +39,18 @@ describe('GET /api/openapi.json', () => {
     const ids = calls.map(({ call }) => call.operationId)
     expect(new Set(ids).size).toBe(ids.length)
     for (const id of ids) expect(id).toMatch(/^[a-z][A-Za-z]+$/)
+  })
+
+  it.each(['/compute', '/houses/import'])('describes the document that %s takes, field by field', (path) => {
+    const schema = description.paths[path]?.post?.requestBody?.content['application/json']?.schema as DocumentDescription
+    expect(schema.required).toEqual(['format', 'version', 'house'])
+    expect(schema.additionalProperties).toBe(false)
+    expect(Object.keys(schema.properties)).toEqual(
+      expect.arrayContaining(['house', 'rooms', 'lines', 'unknowns', 'inspections', 'settings']),
+    )
+    const { unitPrice, quantity } = schema.properties.lines?.items?.properties ?? {}
+    expect(JSON.stringify(unitPrice)).toContain('"type":"string","description":"Dollars as a decimal string, at most 4 decimals."')
+    expect(quantity).toMatchObject({ anyOf: [{ type: 'number' }, { type: 'string' }] })
   })
 
   it('points at nothing that is not there', () => {
@@ -65,6 +83,13 @@ describe.each(calls)('the description of $method $path', ({ path, call }) => {
     const { action } = app.operations.find(({ id }) => id === call.operationId) ?? {}
     expect(call.security).toEqual(action === 'public' ? [] : [{ session: [] }])
     expect('401' in call.responses).toBe(action !== 'public')
+  })
+
+  it('says what a write may be refused with: a conflict of rules, a header or body that can’t be read', () => {
+    const { action, method, ifMatch, body } = app.operations.find(({ id }) => id === call.operationId) ?? {}
+    expect('409' in call.responses).toBe(action !== 'public' && method !== 'get')
+    expect('400' in call.responses).toBe(ifMatch === true || body !== undefined)
+    expect(call.responses.default).toEqual({ $ref: '#/components/responses/Problem' })
   })
 
   it('says which headers it needs: If-Match where an edit could be stale', () => {

@@ -5,28 +5,46 @@ import { isZeroLength, parseLength } from '../units/parseLength.ts'
 
 type Read<T> = { value: T } | { code: string; message: string }
 
+/** JSON Schema of what a field takes: the readers are code, so it is said beside them. */
+interface TakenForm {
+  type: string | string[]
+  description: string
+}
+
+const LENGTH: TakenForm = {
+  type: ['string', 'number'],
+  description: 'A length in any notation, as `12\' 6"` or `3.81 m`, or a number of feet.',
+}
+const PLACE: TakenForm = { type: ['string', 'number'], description: 'As a length; it may be zero, and below zero.' }
+const AMOUNT: TakenForm = { type: 'string', description: 'Dollars as a decimal string, at most 2 decimals.' }
+const UNIT_PRICE: TakenForm = { type: 'string', description: 'Dollars as a decimal string, at most 4 decimals.' }
+const DECIMAL: TakenForm = { type: ['string', 'number'], description: 'A number, or a decimal string.' }
+
 /** A field that is read by a function of its own; what it refuses becomes the field's problem, with its code. */
-function readField<T>(read: (value: unknown) => Read<T>) {
-  return z.unknown().transform((value, context): T => {
-    const result = value === undefined ? { code: 'invalid-type', message: 'is missing' } : read(value)
-    if ('value' in result) return result.value
-    context.addIssue({ code: 'custom', message: result.message, params: { code: result.code } })
-    return z.NEVER
-  })
+function readField<T>(form: TakenForm, read: (value: unknown) => Read<T>) {
+  return z
+    .unknown()
+    .meta({ ...form })
+    .transform((value, context): T => {
+      const result = value === undefined ? { code: 'invalid-type', message: 'is missing' } : read(value)
+      if ('value' in result) return result.value
+      context.addIssue({ code: 'custom', message: result.message, params: { code: result.code } })
+      return z.NEVER
+    })
 }
 
 /** A length more than zero, to inches: text in any notation, or a number of feet. */
-export const lengthField = readField(readLength)
+export const lengthField = readField(LENGTH, readLength)
 /** The same, or zero. */
-export const lengthOrZeroField = readField((value) => (isZero(value) ? { value: 0 } : readLength(value)))
+export const lengthOrZeroField = readField(LENGTH, (value) => (isZero(value) ? { value: 0 } : readLength(value)))
 /** A place on a plan: it may be zero, and below zero. */
-export const placeField = readField(readPlace)
+export const placeField = readField(PLACE, readPlace)
 /** Dollars to whole cents. */
-export const amountField = readField((value) => readDollars(value, 2, LINE_MAX_CENTS, 'one billion dollars'))
+export const amountField = readField(AMOUNT, (value) => readDollars(value, 2, LINE_MAX_CENTS, 'one billion dollars'))
 /** Dollars to ten-thousandths. */
-export const unitPriceField = readField((value) => readDollars(value, 4, UNIT_PRICE_MAX_E4, 'one million dollars'))
+export const unitPriceField = readField(UNIT_PRICE, (value) => readDollars(value, 4, UNIT_PRICE_MAX_E4, 'one million dollars'))
 /** A number, or a decimal string. */
-export const decimalField = readField(readDecimal)
+export const decimalField = readField(DECIMAL, readDecimal)
 
 export const unitPriceRangeField = rangeOf(unitPriceField)
 export const amountRangeField = rangeOf(amountField)
