@@ -140,6 +140,14 @@ describe('workbookSheets', () => {
     expect(textsOf(sheetOf({ rooms: ROOMS, lines }, 'Assumptions and cautions'))).toContain('Line 2: Cellar walls')
   })
 
+  it('keeps the own price of a line that can’t be computed, which the estimate sheet leaves blank', async () => {
+    const override = { price: { low: 12_345, likely: 23_456, high: 34_567 }, reason: 'Bid by phone' }
+    const whole = buildWhole({ rooms: ROOMS, lines: [buildLine({ id: 'bad', roomId: 'cellar', quantity: 'wall_area', override })] })
+    const workbook = await openWorkbook(whole, buildContext())
+    expectResultsStand(workbook)
+    workbook.destroy()
+  })
+
   it('is whole without a line, without a room and without a footprint', async () => {
     const whole = buildWhole({ house: { footprint: null, overhangIn: null, wallHeightIn: null, roof: [] }, rooms: [], lines: [] })
     const workbook = await openWorkbook(whole, buildContext())

@@ -122,7 +122,8 @@ function ownPrices(draft: SheetDraft, lines: readonly WorkbookLine[], firstRow: 
   draft.set(firstRow, 1, text('Prices set for one line, in place of the book’s', 'heading'))
   draft.setRow(firstRow + 1, 1, headCells(OWN_HEADS, [5, 6, 7, 8, 9, 10]))
   overridden.forEach((workbookLine, index) => {
-    const { line, number: lineNumber, bookPriceE4 } = workbookLine
+    // The estimate sheet leaves the cells of a line without figures blank.
+    const { line, number: lineNumber, bookPriceE4, figures } = workbookLine
     const price = line.override?.price
     if (!price) return
     const cells = layout.priceCells(lineNumber)
@@ -131,15 +132,21 @@ function ownPrices(draft: SheetDraft, lines: readonly WorkbookLine[], firstRow: 
       text(line.description),
       text(basisWords(line.basis)),
       text(line.unit),
-      live(cells.low, unitDollars(price.low), 'unit-price'),
-      live(cells.likely, unitDollars(price.likely), 'unit-price'),
-      live(cells.high, unitDollars(price.high), 'unit-price'),
-      ...(bookPriceE4
-        ? [bookPriceE4.low, bookPriceE4.likely, bookPriceE4.high].map((priceE4) => number(unitDollars(priceE4), 'unit-price'))
-        : [text('none'), text('none'), text('none')]),
+      ...(figures === null
+        ? unitPriceCells(price)
+        : [
+            live(cells.low, unitDollars(price.low), 'unit-price'),
+            live(cells.likely, unitDollars(price.likely), 'unit-price'),
+            live(cells.high, unitDollars(price.high), 'unit-price'),
+          ]),
+      ...(bookPriceE4 ? unitPriceCells(bookPriceE4) : [text('none'), text('none'), text('none')]),
       text(line.override?.reason ?? ''),
     ])
   })
+}
+
+function unitPriceCells({ low, likely, high }: LowLikelyHigh): WorkbookCell[] {
+  return [low, likely, high].map((priceE4) => number(unitDollars(priceE4), 'unit-price'))
 }
 
 function headCells(heads: readonly string[], rightColumns: readonly number[]): WorkbookCell[] {
