@@ -19,13 +19,13 @@ export function nameAt(text: string, caret: number): NameSpan | null {
   return /^[a-z_]/i.test(name) ? { from, to, name } : null
 }
 
-/** Measures whose name, or a word in it, begins with what is typed; whole beginnings first. A room's line may use its room's and the house's. */
+/** Measures whose name, or a word in it, begins with what is typed; whole beginnings first, the shortest of them before the others. A room's line may use its room's and the house's. */
 export function completeMeasure(typed: string, scope: 'room' | 'house', limit: number): Measure[] {
   const start = typed.toLowerCase()
   const own = MEASURES.filter((measure) => measure.scope === scope)
   const ownNames = new Set<string>(own.map(({ name }) => name))
   const unique = [...own, ...MEASURES.filter((measure) => measure.scope === 'house' && !ownNames.has(measure.name))]
-  const whole = unique.filter(({ name }) => name.startsWith(start))
+  const whole = unique.filter(({ name }) => name.startsWith(start)).sort((a, b) => a.name.length - b.name.length)
   const inside = unique.filter(({ name }) => !name.startsWith(start) && name.split('_').some((word) => word.startsWith(start)))
   const found = [...whole, ...inside]
   const isFinished = found.length === 1 && found[0]?.name === start

@@ -30,15 +30,16 @@ export function useEstimateRows(model: EstimateModel) {
     })
   }
 
-  function rebuild(): void {
+  /** Heads and feet keep their objects, so the grid has to be told that they say something else. */
+  function rebuild(changed: readonly GridRow[] = []): void {
     rows.value = build()
     tell({ kind: 'order' })
+    tell({ kind: 'look', rows: [...changed, ...known.values()] })
   }
 
   function follow({ rows: changed, isStructural }: ModelNews): void {
     if (isStructural) {
-      rebuild()
-      tell({ kind: 'look', rows: [...changed, ...known.values()] })
+      rebuild(changed)
       return
     }
     const groups = grouping.value === 'none' ? [] : refreshSubtotals(known.values(), model.subtotals(grouping.value))
