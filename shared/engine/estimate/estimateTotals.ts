@@ -1,6 +1,7 @@
 import type { LowLikelyHigh } from '../../schemas/common.ts'
-import type { EstimateSettings, Totals } from '../../schemas/estimate.ts'
-import { exactPercent, percentOf } from '../money/percentOf.ts'
+import type { Totals } from '../../schemas/estimate.ts'
+import { percentOf } from '../money/percentOf.ts'
+import type { Adders } from './adders.ts'
 
 /** Sums of the rounded lines, whole cents. */
 export interface DirectSums {
@@ -16,34 +17,29 @@ type End = keyof LowLikelyHigh
  *
  * $1,000 own hands and $2,000 hired, 20 %, materials tax 8.25 %, permits $450, contingency 10 % → 3,000 + 400 + 82.50 + 450 + 393.25 = $4,325.75.
  */
-export function estimateTotals({ ownHandsCents, hiredCents }: DirectSums, settings: EstimateSettings): Totals {
-  const overheadPercent = exactPercent(settings.overheadAndProfitPercent)
-  const taxPercent = exactPercent(settings.salesTax.percent)
+export function estimateTotals({ ownHandsCents, hiredCents }: DirectSums, adders: Adders): Totals {
+  const { overheadAndProfit, salesTax, permitsCents: permits, contingency } = adders
   const directCents = eachEnd((end) => ownHandsCents[end] + hiredCents[end])
-  const overheadAndProfitCents = eachEnd((end) => percentOf(hiredCents[end], overheadPercent))
-  const taxedCents = taxedBase(settings.salesTax.rule, ownHandsCents, directCents, overheadAndProfitCents)
-  const salesTaxCents = eachEnd((end) => percentOf(taxedCents[end], taxPercent))
-  const permitsCents = eachEnd(() => settings.permitsCents)
-  const beforeCents = eachEnd((end) => directCents[end] + overheadAndProfitCents[end] + salesTaxCents[end] + permitsCents[end])
-  const contingencyCents = contingencyOf(settings.contingency, beforeCents)
+  const overheadAndProfitCents = eachEnd((end) => percentOf(hiredCents[end], overheadAndProfit))
+  const taxedCents = taxedBase(salesTax.rule, ownHandsCents, directCents, overheadAndProfitCents)
+  const salesTaxCents = eachEnd((end) => percentOf(taxedCents[end], salesTax.percent))
+  const permitsCents = eachEnd(() => permits)
+  const beforeCents = eachEnd((end) => directCents[end] + overheadAndProfitCents[end] + salesTaxCents[end] + permits)
+  const contingencyCents = eachEnd((end) =>
+    contingency.method === 'fixed' ? contingency.amountCents : percentOf(beforeCents[end], contingency.percent),
+  )
   const totalCents = eachEnd((end) => beforeCents[end] + contingencyCents[end])
   return { directCents, overheadAndProfitCents, salesTaxCents, permitsCents, contingencyCents, totalCents }
 }
 
 function taxedBase(
-  rule: EstimateSettings['salesTax']['rule'],
+  rule: Adders['salesTax']['rule'],
   ownHands: LowLikelyHigh,
   direct: LowLikelyHigh,
   overheadAndProfit: LowLikelyHigh,
 ): LowLikelyHigh {
   if (rule === 'none') return eachEnd(() => 0)
   return rule === 'materials' ? ownHands : eachEnd((end) => direct[end] + overheadAndProfit[end])
-}
-
-function contingencyOf(contingency: EstimateSettings['contingency'], base: LowLikelyHigh): LowLikelyHigh {
-  if (contingency.method === 'fixed') return eachEnd(() => contingency.amountCents)
-  const percent = exactPercent(contingency.percent)
-  return eachEnd((end) => percentOf(base[end], percent))
 }
 
 function eachEnd(figure: (end: End) => number): LowLikelyHigh {

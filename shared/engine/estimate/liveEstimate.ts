@@ -9,6 +9,7 @@ import { HOUSE_MEASURES } from '../takeoff/houseMeasureList.ts'
 import type { Measure } from '../takeoff/measure.ts'
 import { ROOM_MEASURE_COUNT } from '../takeoff/roomMeasureList.ts'
 import { whyNoRoomMeasure } from '../takeoff/whyNoRoomMeasure.ts'
+import { addersOf, type Adders } from './adders.ts'
 import { estimateTotals } from './estimateTotals.ts'
 import { FormulaShelf, type LineFormula } from './formulaShelf.ts'
 import type { Subtotal } from './groupSums.ts'
@@ -46,12 +47,12 @@ export class LiveEstimate {
   private readonly order: number[] = []
   /** Slots of lines that a change of any room may change. */
   private readonly roomDependents = new Set<number>()
-  private settings: EstimateSettings
+  private adders: Adders
   private readonly explain = (slot: number): LineError => this.explainLine(slot)
 
   constructor({ house, rooms, lines, settings }: EstimateInput, parse: FormulaParser) {
     this.shelf = new FormulaShelf(this.columns, parse)
-    this.settings = settings
+    this.adders = addersOf(settings)
     this.house.setHouse(house)
     for (const room of rooms) this.rooms.put(room)
     for (const line of lines) this.enter(this.newSlot(line.key, null), line)
@@ -114,7 +115,7 @@ export class LiveEstimate {
   }
 
   setSettings(settings: EstimateSettings): void {
-    this.settings = settings
+    this.adders = addersOf(settings)
   }
 
   line(key: string): LineFigures {
@@ -122,7 +123,7 @@ export class LiveEstimate {
   }
 
   totals(): Totals {
-    return estimateTotals(this.sums.direct(), this.settings)
+    return estimateTotals(this.sums.direct(), this.adders)
   }
 
   subtotals(by: SubtotalKind): Map<string | null, Subtotal> {
@@ -202,8 +203,20 @@ export class LiveEstimate {
   }
 
   private workAgain(slot: number): void {
-    this.sums.add(this.lines.columns, slot, -1)
-    this.workAndAdd(slot)
+    const { columns } = this.lines
+    const low = columns.lowCents[slot] as number
+    const likely = columns.likelyCents[slot] as number
+    const high = columns.highCents[slot] as number
+    const hours = columns.hoursHundredths[slot] as number
+    this.lines.work(slot, this.explain)
+    this.sums.change(
+      columns,
+      slot,
+      (columns.lowCents[slot] as number) - low,
+      (columns.likelyCents[slot] as number) - likely,
+      (columns.highCents[slot] as number) - high,
+      (columns.hoursHundredths[slot] as number) - hours,
+    )
   }
 
   private roomChanged({ measured, slots }: RoomPlace): void {

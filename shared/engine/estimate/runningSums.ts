@@ -31,7 +31,11 @@ export class RunningSums {
     const low = sign * (lines.lowCents[slot] as number)
     const likely = sign * (lines.likelyCents[slot] as number)
     const high = sign * (lines.highCents[slot] as number)
-    const hours = sign * (lines.hoursHundredths[slot] as number)
+    this.change(lines, slot, low, likely, high, sign * (lines.hoursHundredths[slot] as number))
+  }
+
+  /** Adds what a line that stays in its groups came to more than before. */
+  change(lines: LineColumns, slot: number, low: number, likely: number, high: number, hours: number): void {
     const { cents } = this
     const at = lines.isHired[slot] === 1 ? 3 : 0
     cents[at] = (cents[at] as number) + low
