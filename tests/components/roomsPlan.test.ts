@@ -175,4 +175,30 @@ describe('placeDimensions', () => {
     expect(long?.offset).toBe(16)
     expect(short?.offset).toBeGreaterThan(16)
   })
+
+  it('stands the second dimension of a notch in line with those beyond it, where the two would cross', () => {
+    const walls = outlineOf([
+      [0, 0],
+      [280, 0],
+      [280, 160],
+      [200, 160],
+      [200, 220],
+      [0, 220],
+    ])
+    const [, , alongNotch, intoNotch, bottom] = placeDimensions(walls, SPACE)
+
+    expect(alongNotch).toEqual({ offset: 16, textOffset: 16 })
+    // The room reaches 80 further right than the wall that goes into the notch.
+    expect(intoNotch).toEqual({ offset: 96, textOffset: 96 })
+    expect(bottom?.offset).toBe(16)
+  })
 })
+
+function outlineOf(corners: readonly Corner[]) {
+  return planLayout(corners, { width: 280, maxHeight: 220, margin: 0 }).walls.map(({ from, to, outward }) => ({
+    from,
+    to,
+    outward,
+    text: `8' 0"`,
+  }))
+}

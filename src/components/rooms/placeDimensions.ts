@@ -20,8 +20,9 @@ const STEP = 14
 /** Nearer than this the words of two dimensions, or words and a wall, run into each other. */
 const CLEARANCE = 12
 const WALL_CLEARANCE = 6
-/** Out from the wall, then inside the room. */
-const STEPS = [0, 1, 2, 3, -1]
+const LINE_CLEARANCE = 7
+/** Out from the wall. */
+const STEPS_OUT = 3
 
 interface Space {
   /** Of the nearest dimension line, from its wall's inner face. */
@@ -31,25 +32,66 @@ interface Space {
 }
 
 /**
- * How far from its wall each dimension stands: as near as it can without its words meeting a wall or the words of a longer wall, outside the room
- * if there is any way. Where nothing is clear it stands nearest.
+ * How far from its wall each dimension stands: as near as it can without its words meeting a wall or another dimension, outside the room if there is
+ * any way. In the notch of an L there is none: there it goes out to the rest of the room's dimensions on that side, and stands in line with them.
+ * Where nothing is clear it stands nearest.
  */
 export function placeDimensions(walls: readonly DimensionedWall[], { nearest, thickness }: Space): PlacedDimension[] {
   const places: PlacedDimension[] = walls.map((wall) => placeAt(wall, nearest))
-  const taken: Corner[] = []
+  const taken: { words: Corner[]; line: Segment }[] = []
   for (const { wall, index } of longestFirst(walls)) {
     const others = walls.filter((other) => other !== wall)
-    const isClear = ({ textOffset }: PlacedDimension) =>
-      wordPoints(wall, textOffset).every(
-        (point) =>
-          taken.every((other) => distance(point, other) >= CLEARANCE) &&
-          others.every((other) => distanceToWall(point, other) >= thickness + WALL_CLEARANCE),
+    const isClear = (place: PlacedDimension) => {
+      const words = wordPoints(wall, place.textOffset)
+      const line = lineAt(wall, place.offset)
+      return (
+        words.every((point) => others.every((other) => distanceToSegment(point, other) >= thickness + WALL_CLEARANCE)) &&
+        others.every((other) => !doCross(line, other)) &&
+        taken.every((other) => !doCross(line, other.line) && areApart(words, other.words) && isOffLine(words, other.line)) &&
+        taken.every((other) => isOffLine(other.words, line))
       )
-    const place = STEPS.map((steps) => placeAt(wall, steps < 0 ? steps * (nearest + STEP) : nearest + steps * STEP)).find(isClear)
+    }
+    const steps = Array.from({ length: STEPS_OUT + 1 }, (_, step) => nearest + step * STEP)
+    const inLine = reachOut(wall, walls) + nearest
+    const place = [...steps, inLine, -(nearest + STEP)].map((offset) => placeAt(wall, offset)).find(isClear)
     if (place) places[index] = place
-    taken.push(...wordPoints(wall, (place ?? placeAt(wall, nearest)).textOffset))
+    const { offset, textOffset } = places[index]!
+    taken.push({ words: wordPoints(wall, textOffset), line: lineAt(wall, offset) })
   }
   return places
+}
+
+type Segment = Pick<DimensionedWall, 'from' | 'to'>
+
+function lineAt({ from, to, outward }: DimensionedWall, offset: number): Segment {
+  const out = ([x, y]: Corner): Corner => [x + outward[0] * offset, y + outward[1] * offset]
+  return { from: out(from), to: out(to) }
+}
+
+/** How far the room reaches beyond a wall, on the wall's outer side. */
+function reachOut({ from, outward }: DimensionedWall, walls: readonly DimensionedWall[]): number {
+  return Math.max(...walls.map((other) => (other.from[0] - from[0]) * outward[0] + (other.from[1] - from[1]) * outward[1]))
+}
+
+function areApart(some: readonly Corner[], others: readonly Corner[]): boolean {
+  return some.every((point) => others.every((other) => distance(point, other) >= CLEARANCE))
+}
+
+function isOffLine(words: readonly Corner[], line: Segment): boolean {
+  return words.every((point) => distanceToSegment(point, line) >= LINE_CLEARANCE)
+}
+
+/** Whether one line goes through the other; to meet at an end is no crossing. */
+function doCross(one: Segment, other: Segment): boolean {
+  return isParted(one, other) && isParted(other, one)
+}
+
+function isParted({ from, to }: Segment, by: Segment): boolean {
+  return sideOf(from, by) * sideOf(to, by) < -1e-9
+}
+
+function sideOf([x, y]: Corner, { from, to }: Segment): number {
+  return Math.sign((to[0] - from[0]) * (y - from[1]) - (to[1] - from[1]) * (x - from[0]))
 }
 
 /** A long wall's dimension has its place; a short one's can go round it. */
@@ -79,7 +121,7 @@ function wordPoints({ from, to, outward, text }: DimensionedWall, textOffset: nu
   ])
 }
 
-function distanceToWall(point: Corner, { from, to }: DimensionedWall): number {
+function distanceToSegment(point: Corner, { from, to }: Segment): number {
   const lengthSquared = (to[0] - from[0]) ** 2 + (to[1] - from[1]) ** 2
   const dot = (point[0] - from[0]) * (to[0] - from[0]) + (point[1] - from[1]) * (to[1] - from[1])
   const along = lengthSquared === 0 ? 0 : Math.max(0, Math.min(1, dot / lengthSquared))
