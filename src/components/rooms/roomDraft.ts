@@ -134,6 +134,11 @@ export function walkDraft({ start, headingDegrees, runs }: WallWalk): RoomDraft[
   }
 }
 
+/** A wall that waits to be keyed. Most corners turn right as one walks with the wall to the left. */
+export function blankRun(): RunDraft {
+  return { id: newRowId(), lengthText: '', turn: 'right', angleText: '' }
+}
+
 function turnDraft(degrees: number): Pick<RunDraft, 'turn' | 'angleText'> {
   const turned = Math.round(normalDegrees(degrees) * 1000) / 1000
   if (turned === 0) return { turn: 'straight', angleText: '' }

@@ -57,7 +57,8 @@ export function useRoomsPage(houseId: string, rooms: Readonly<Ref<Room[] | undef
   )
 
   function isUntouched(draft: RoomDraft): boolean {
-    return draft.name === '' && draft.lengthText === '' && draft.widthText === '' && draft.walk.runs.length === 0
+    const texts = [draft.name, draft.lengthText, draft.widthText, ...draft.walk.runs.map(({ lengthText }) => lengthText)]
+    return texts.every((text) => text === '')
   }
 
   function startNew(): void {
