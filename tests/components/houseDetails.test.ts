@@ -160,7 +160,7 @@ describe('HouseDetailsForm', () => {
         .findAll('button')
         .find((button) => button.text() === 'Add the roof')!
         .trigger('click')
-      await field('Rise in 12').setValue('8')
+      await field('Pitch').setValue('8')
       await rest()
       expect(api.callsTo('PATCH /houses/h1').at(-1)?.body).toEqual({ roof: [{ kind: 'gable', rise: 8 }] })
       await wrapper.get('button[aria-label="Remove part 1 of the roof"]').trigger('click')

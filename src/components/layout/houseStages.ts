@@ -49,7 +49,7 @@ function summaryState(summary: HouseSummary | undefined): Standing {
   if (!summary) return { state: 'empty', says: '' }
   if (summary.lineCount === 0) return { state: 'empty', says: 'no lines' }
   if (summary.errorCount > 0) return { state: 'under-way', says: `${summary.errorCount} left out` }
-  return { state: 'done', says: 'complete' }
+  return { state: 'done', says: 'ready' }
 }
 
 function counted(count: number, noun: string): string {
