@@ -2,12 +2,17 @@ import type { RouteLocationNormalized, Router } from 'vue-router'
 import { onSignedOut } from '../api/http.ts'
 import { useSessionStore } from '../stores/session.ts'
 import { navigationProblem } from './navigationProblem.ts'
+import { arrive, startOnTheWay } from './navigationProgress.ts'
 
 const SIGNED_OUT_NOTICE = 'You were signed out. Sign in to go on where you were.'
 
 /** Sends people who aren't signed in to the sign-in and back, and keeps from each role the pages that aren't theirs. */
 export function guardRoutes(router: Router): void {
   const session = useSessionStore()
+
+  router.beforeEach((to, from) => {
+    if (to.path !== from.path) startOnTheWay()
+  })
 
   router.beforeEach(async (to) => {
     if (to.meta.isPublic) return true
@@ -19,10 +24,12 @@ export function guardRoutes(router: Router): void {
   })
 
   router.onError((error: unknown, to) => {
+    arrive()
     navigationProblem.value = { error, wanted: to.fullPath }
   })
 
   router.afterEach((to) => {
+    arrive()
     navigationProblem.value = null
     document.title = to.meta.title ? `${to.meta.title} · Quoinbook` : 'Quoinbook'
   })
