@@ -4,8 +4,10 @@ type Bench = () => AsyncIterable<BenchFigure> | Iterable<BenchFigure> | Promise<
 
 /** The benches, a file each. They run one after the other, so that none is in another's way. */
 const BENCHES: Record<string, () => Promise<Bench>> = {
+  browser: async () => (await import('./browser.ts')).browserBench,
   engine: async () => (await import('./engine.ts')).engineBench,
   server: async () => (await import('./server.ts')).serverBench,
+  start: async () => (await import('./start.ts')).startBench,
   workbook: async () => (await import('./workbook.ts')).workbookBench,
 }
 
