@@ -48,6 +48,8 @@ export function useEstimateDesk(model: EstimateModel) {
   const panel = shallowRef<DeskPanel | null>(null)
   const notice = useNotice()
   const focusedKey = shallowRef<string | null>(null)
+  /** A line that is to be gone to: the grid follows. */
+  const wanted = shallowRef<{ key: string } | null>(null)
 
   const { priceBookVersion, regionKey } = model.estimate.value
   const { data: items } = useQuery({ ...bookItemsQuery({ version: priceBookVersion, isDraft: false }, regionKey), enabled: !isReadOnly })
@@ -107,6 +109,10 @@ export function useEstimateDesk(model: EstimateModel) {
     focusedKey,
     focusedLine,
     focus,
+    wanted,
+    show(key: string): void {
+      wanted.value = { key }
+    },
     items,
     findItem,
     findItemByName: (name: string): PriceItem | undefined => byName.value.get(name.toLowerCase()),

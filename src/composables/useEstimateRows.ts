@@ -18,15 +18,15 @@ export function useEstimateRows(model: EstimateModel) {
   const rows = shallowRef<readonly GridRow[]>(build())
   const listeners = new Set<(news: RowsNews) => void>()
 
-  function build(): GridRow[] {
+  function build(folded: ReadonlySet<string> = collapsed.value, groups = known): GridRow[] {
     const subtotals = grouping.value === 'none' ? NO_SUBTOTALS : model.subtotals(grouping.value)
     return buildEstimateRows({
       lines: model.list.rows(),
       grouping: grouping.value,
       rooms: model.rooms.value,
-      collapsed: collapsed.value,
+      collapsed: folded,
       subtotals,
-      known,
+      known: groups,
     })
   }
 
@@ -95,6 +95,8 @@ export function useEstimateRows(model: EstimateModel) {
     reveal,
     collapseAll,
     group,
+    /** Heads, lines and feet with nothing folded up, as on paper. */
+    all: (): GridRow[] => build(new Set(), new Map()),
     /** The lines that are shown, in order, folded groups left out. */
     shownLines: (): LineRow[] => rows.value.filter((row): row is LineRow => row.kind === 'line'),
     onNews(listener: (news: RowsNews) => void): () => void {

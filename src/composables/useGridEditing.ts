@@ -1,6 +1,4 @@
-import type { CellEditRequestEvent, CellEditingStartedEvent } from 'ag-grid-community'
 import type { LineFields } from '../../shared/schemas/estimate.ts'
-import type { GridRow } from './estimateRows.ts'
 import { clearedCell, FIELD_OF_COLUMN, keptQuantity, readCell, type CellColumn } from './lineCells.ts'
 import type { LineField, LineRow } from './lineRow.ts'
 import { loadFormulaParser } from './formulaParser.ts'
@@ -21,20 +19,17 @@ const COLUMN_WORDS: Partial<Record<CellColumn, string>> = {
 export function useGridEditing({ model, edits, say }: EstimateDesk) {
   let started: { key: string; field: LineField; value: unknown } | null = null
 
-  function onStarted({ data, column }: CellEditingStartedEvent<GridRow>): void {
-    const field = FIELD_OF_COLUMN[column.getColId() as CellColumn]
-    if (data?.kind !== 'line' || field === null) return
-    started = { key: data.key, field, value: data.fields[field] }
+  /** An editor opens: what the field holds now is what its entry is measured against. */
+  function onStarted(row: LineRow, column: CellColumn): void {
+    const field = FIELD_OF_COLUMN[column]
+    if (field === null) return
+    started = { key: row.key, field, value: row.fields[field] }
+    model.setEdited(row.key)
     if (field === 'quantity') void loadFormulaParser()
-    model.setEdited(data.key)
   }
 
   function onStopped(): void {
     model.setEdited(null)
-  }
-
-  function onRequest({ data, column, newValue }: CellEditRequestEvent<GridRow>): void {
-    if (data.kind === 'line') commit(data, column.getColId() as CellColumn, newValue)
   }
 
   /** Keeps what was keyed into a cell. Rooms come as ids, all else as text. */
@@ -95,7 +90,7 @@ export function useGridEditing({ model, edits, say }: EstimateDesk) {
     )
   }
 
-  return { onStarted, onStopped, onRequest, commit, clear, fillDown }
+  return { onStarted, onStopped, commit, clear, fillDown }
 }
 
 function wordsOf(column: CellColumn): string {

@@ -84,9 +84,8 @@ export function useGridKeys({ desk, selection, editing, addBelow, command, leave
       case 'tab':
         return leave(intent.isBack)
       case 'extend': {
-        const corner = selection.extendBy(intent.rows, intent.across)
-        if (corner) api.ensureIndexVisible(corner.rowIndex)
-        return
+        const corner = selection.extendBy(focus, intent.rows, intent.across)
+        return api.ensureIndexVisible(corner.rowIndex)
       }
       case 'go':
         selection.clear()

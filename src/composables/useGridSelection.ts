@@ -10,7 +10,7 @@ export interface GridSelection {
   columns: readonly CellColumn[]
 }
 
-interface CellPlace {
+export interface CellPlace {
   rowIndex: number
   column: CellColumn
 }
@@ -32,27 +32,24 @@ export function useGridSelection(api: () => GridApi<GridRow> | null, root: () =>
     return shown.map((column) => column.getColId()).filter(isCellColumn)
   }
 
-  /** A plain move: what was selected is let go, and the next block begins here. */
-  function place(rowIndex: number, column: CellColumn): void {
-    anchor = { rowIndex, column }
-    head = anchor
-    set(NOTHING)
+  /** A block of cells from one corner to the other. */
+  function extendTo(from: CellPlace, to: CellPlace): void {
+    anchor = from
+    head = to
+    set(block(from, to))
   }
 
-  function extendTo(rowIndex: number, column: CellColumn): void {
-    anchor ??= { rowIndex, column }
-    head = { rowIndex, column }
-    set(block(anchor, head))
-  }
-
-  /** One step of Shift with an arrow; answers where the far corner now is, so that it can be scrolled to. */
-  function extendBy(rows: number, across: number): CellPlace | null {
-    if (!head) return null
+  /** One step of Shift with an arrow, from the focused cell where nothing is selected yet; answers where the far corner now is. */
+  function extendBy(focused: CellPlace, rows: number, across: number): CellPlace {
+    const isGoingOn = selection.value.keys.size > 0 && anchor !== null && head !== null
+    const from = isGoingOn && anchor ? anchor : focused
+    const before = isGoingOn && head ? head : focused
     const shown = columns()
-    const at = Math.min(Math.max(shown.indexOf(head.column) + across, 0), shown.length - 1)
+    const at = Math.min(Math.max(shown.indexOf(before.column) + across, 0), shown.length - 1)
     const lastRow = (api()?.getDisplayedRowCount() ?? 1) - 1
-    extendTo(Math.min(Math.max(head.rowIndex + rows, 0), lastRow), shown[at] ?? head.column)
-    return head
+    const to = { rowIndex: Math.min(Math.max(before.rowIndex + rows, 0), lastRow), column: shown[at] ?? before.column }
+    extendTo(from, to)
+    return to
   }
 
   /** Puts a whole row in or takes it out. The first time the focused row comes along. */
@@ -69,6 +66,8 @@ export function useGridSelection(api: () => GridApi<GridRow> | null, root: () =>
   }
 
   function clear(): void {
+    anchor = null
+    head = null
     set(NOTHING)
   }
 
@@ -124,7 +123,7 @@ export function useGridSelection(api: () => GridApi<GridRow> | null, root: () =>
     return selection.value.keys.size > 0 && selection.value.columns.length === columns().length
   }
 
-  return { selection, place, extendTo, extendBy, toggleRow, selectRows, clear, has, rows, columns, isWholeRows }
+  return { selection, extendTo, extendBy, toggleRow, selectRows, clear, has, rows, columns, isWholeRows }
 }
 
 export type GridSelectionHand = ReturnType<typeof useGridSelection>

@@ -1,10 +1,13 @@
 import type { GridApi, IRowNode } from 'ag-grid-community'
 import { onScopeDispose } from 'vue'
 import type { GridRow } from './estimateRows.ts'
+import { rowsDiff } from './rowsDiff.ts'
 import type { EstimateRows, RowsNews } from './useEstimateRows.ts'
 
 /** Keeps the grid's rows like the estimate's: a changed line is drawn anew alone, and after a move the focus stays with its line. */
 export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | null) {
+  /** The rows that the grid has. */
+  let shown = rows.rows.value
   const stop = rows.onNews((news) => {
     const grid = api()
     if (grid) follow(grid, news)
@@ -20,13 +23,20 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
     // The grid gives undefined, whatever its type says, while no cell has the focus.
     const focused = grid.getFocusedCell() ?? null
     const key = focused === null ? undefined : grid.getDisplayedRowAtIndex(focused.rowIndex)?.data?.key
-    // The grid compares by row id: lines that stay keep their row, and 5,000 of them cost a few milliseconds.
-    grid.setGridOption('rowData', rows.rows.value as GridRow[])
+    takeRows(grid)
     if (focused === null || key === undefined) return
     const now = grid.getRowNode(key)?.rowIndex ?? null
     // Where the focused line is gone, the focus stays where it was, on the line that moved up.
     const goal = now ?? Math.min(focused.rowIndex, grid.getDisplayedRowCount() - 1)
     if (now !== focused.rowIndex && goal >= 0) grid.setFocusedCell(goal, focused.column)
+  }
+
+  /** What comes and goes is handed over by itself; only rows that changed places need the whole list, in which the grid finds its rows by their ids. */
+  function takeRows(grid: GridApi<GridRow>): void {
+    const diff = rowsDiff(shown, rows.rows.value)
+    shown = rows.rows.value
+    if (diff === null) grid.setGridOption('rowData', [...shown])
+    else if (diff.remove.length + diff.add.length > 0) grid.applyTransaction(diff)
   }
 
   /** A cell that is being edited would begin anew. */

@@ -1,5 +1,5 @@
 import type { AppContext } from 'vue'
-import type { CellClassParams, ColDef, EditableCallbackParams, ValueGetterParams } from 'ag-grid-community'
+import type { CellClassParams, ColDef, EditableCallbackParams, ValueGetterParams, ValueSetterParams } from 'ag-grid-community'
 import { EVIDENCE_MARKS } from '../../../shared/schemas/estimate.ts'
 import { NAME_MAX, NOTE_MAX } from '../../../shared/schemas/common.ts'
 import { WHOLE_HOUSE, type GridRow } from '../../composables/estimateRows.ts'
@@ -23,6 +23,8 @@ import { columnOfError } from './lineProblem.ts'
 
 type Column = ColDef<GridRow> & { colId: CellColumn }
 
+/** From here on a window has room for whole descriptions and formulas. */
+const WIDE_WINDOW = 1700
 const MARK_CHOICES: readonly Choice[] = EVIDENCE_MARKS.map((mark) => ({ value: mark, title: mark, mark }))
 
 interface ColumnOptions {
@@ -50,10 +52,12 @@ export function estimateColumns({ isReadOnly, appContext, isSelected, isFound }:
     width,
     cellClassRules: classRules,
     valueGetter: valueOf,
+    valueSetter: keep,
     ...more,
     colId,
   })
 
+  const isWide = window.innerWidth >= WIDE_WINDOW
   return [
     column('evidence', 62, {
       pinned: 'left',
@@ -64,7 +68,7 @@ export function estimateColumns({ isReadOnly, appContext, isSelected, isFound }:
       cellEditor: choiceEditor,
       cellEditorParams: { choices: () => MARK_CHOICES, label: 'How it is known' },
     }),
-    column('description', 216, {
+    column('description', isWide ? 320 : 216, {
       pinned: 'left',
       lockPosition: 'left',
       cellRenderer: DescriptionCell,
@@ -78,7 +82,7 @@ export function estimateColumns({ isReadOnly, appContext, isSelected, isFound }:
       cellEditor: choiceEditor,
       cellEditorParams: ({ context }: { context: GridContext }) => ({ choices: () => roomChoices(context), label: 'Room' }),
     }),
-    column('quantity', 236, { cellRenderer: QuantityCell, editable: isEditable, cellEditor: formulaEditor }),
+    column('quantity', isWide ? 320 : 236, { cellRenderer: QuantityCell, editable: isEditable, cellEditor: formulaEditor }),
     column('basis', 90, { cellRenderer: BasisCell }),
     column('price', 132, { cellRenderer: PriceCell, type: 'figure' }),
     column('amount', 104, { cellRenderer: AmountCell, type: 'figure' }),
@@ -93,6 +97,12 @@ export function estimateColumns({ isReadOnly, appContext, isSelected, isFound }:
       cellEditorParams: { label: 'Note', maxLength: NOTE_MAX, isLong: true },
     }),
   ]
+}
+
+/** The model keeps what was keyed and has the row drawn; to the grid itself nothing changed. */
+function keep({ data, column, newValue, context }: ValueSetterParams<GridRow, unknown>): boolean {
+  if (data?.kind === 'line') (context as GridContext).editing.commit(data, column.getColId() as CellColumn, newValue)
+  return false
 }
 
 /** What an editor begins with, and what tells the grid that a cell differs. */

@@ -1,5 +1,6 @@
 import {
   CellStyleModule,
+  ClientSideRowModelApiModule,
   ClientSideRowModelModule,
   ColumnApiModule,
   CustomEditorModule,
@@ -15,6 +16,7 @@ import {
 export function registerGridModules(): void {
   ModuleRegistry.registerModules([
     CellStyleModule,
+    ClientSideRowModelApiModule,
     ClientSideRowModelModule,
     ColumnApiModule,
     CustomEditorModule,

@@ -1,4 +1,7 @@
 import type { ICellEditorComp, ICellEditorParams } from 'ag-grid-community'
+import type { CellColumn } from '../../../composables/lineCells.ts'
+import type { LineRow } from '../../../composables/lineRow.ts'
+import type { GridContext } from '../gridContext.ts'
 import { h, render, type AppContext, type Component } from 'vue'
 
 /** What an editor component exposes to the grid. */
@@ -19,8 +22,11 @@ export function vueCellEditor(component: Component, appContext: AppContext | nul
   return class VueCellEditor implements ICellEditorComp {
     private readonly place = document.createElement('div')
     private editor: ExposedEditor | null = null
+    private context: GridContext | null = null
 
-    init(params: ICellEditorParams): void {
+    init(params: ICellEditorParams<LineRow, unknown, GridContext>): void {
+      this.context = params.context
+      params.context.editing.onStarted(params.data, params.column.getColId() as CellColumn)
       const node = h(component, { params })
       node.appContext = appContext
       this.place.className = 'cell-editor'
@@ -50,6 +56,7 @@ export function vueCellEditor(component: Component, appContext: AppContext | nul
     }
 
     destroy(): void {
+      this.context?.editing.onStopped()
       render(null, this.place)
     }
   }
