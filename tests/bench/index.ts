@@ -6,6 +6,8 @@ type Bench = () => AsyncIterable<BenchFigure> | Iterable<BenchFigure> | Promise<
 const BENCHES: Record<string, () => Promise<Bench>> = {
   browser: async () => (await import('./browser.ts')).browserBench,
   engine: async () => (await import('./engine.ts')).engineBench,
+  password: async () => (await import('./password.ts')).passwordBench,
+  search: async () => (await import('./search.ts')).searchBench,
   server: async () => (await import('./server.ts')).serverBench,
   start: async () => (await import('./start.ts')).startBench,
   workbook: async () => (await import('./workbook.ts')).workbookBench,
