@@ -31,7 +31,7 @@ export async function* paintFigures(browser: Browser, page: BenchPage): AsyncGen
       value: median(ours),
       unit: 'ms',
       floor: median(plain),
-      note: 'Nothing is cached; the floor is a plain table of all lines, made beforehand. Most of the rest is taking in the scripts of the page and of its grid.',
+      note: 'Nothing is cached, and the floor was made beforehand. Script and layout are about a fifth of it; the rest is fetching and compiling the scripts of the page and of its grid, and painting.',
     })
   } finally {
     await table.stop()
