@@ -1,5 +1,7 @@
 import type { RouteLocationNormalized, Router } from 'vue-router'
-import { onSignedOut } from '../api/http.ts'
+import { readFirm } from '../api/firm.ts'
+import { onSignedOut, ProblemError } from '../api/http.ts'
+import { useUndoToast } from '../composables/useUndoToast.ts'
 import { useSessionStore } from '../stores/session.ts'
 import { navigationProblem } from './navigationProblem.ts'
 import { arrive, startOnTheWay } from './navigationProgress.ts'
@@ -23,9 +25,12 @@ export function guardRoutes(router: Router): void {
     return true
   })
 
-  router.onError((error: unknown, to) => {
+  router.onError(async (error: unknown, to, from) => {
     arrive()
-    navigationProblem.value = { error, wanted: to.fullPath }
+    const lostConnection = from.matched.length > 0 ? await whyUnreachable() : null
+    // Whoever stands on a page, with words half typed, stays on it while there is no connection.
+    if (lostConnection) useUndoToast().sayProblem(lostConnection)
+    else navigationProblem.value = { error, wanted: to.fullPath }
   })
 
   router.afterEach((to) => {
@@ -39,6 +44,12 @@ export function guardRoutes(router: Router): void {
     session.leave(SIGNED_OUT_NOTICE)
     void router.push(signInAnd(router.currentRoute.value))
   })
+}
+
+/** Tells a lost connection from a part of the app that is no longer there. */
+async function whyUnreachable(): Promise<ProblemError | null> {
+  const reason: unknown = await readFirm().catch((error: unknown) => error)
+  return reason instanceof ProblemError && reason.isUnreachable ? reason : null
 }
 
 function signInAnd(wanted: RouteLocationNormalized) {

@@ -5,6 +5,7 @@ import { createMemoryHistory, createRouter, type Router } from 'vue-router'
 import type { Role } from '../../shared/schemas/account.ts'
 import { http } from '../../src/api/http.ts'
 import { guardRoutes } from '../../src/router/guards.ts'
+import { useUndoToast } from '../../src/composables/useUndoToast.ts'
 import { navigationProblem } from '../../src/router/navigationProblem.ts'
 import type { RouteName } from '../../src/router/routes.ts'
 import { routes } from '../../src/router/routes.ts'
@@ -115,5 +116,20 @@ describe('when the server can’t be reached at the first page', () => {
     stubApi({ 'GET /sessions/current': new TypeError('Failed to fetch') })
     await router.push('/people').catch(() => {})
     expect(navigationProblem.value).toMatchObject({ wanted: '/people' })
+  })
+})
+
+describe('when the connection is lost while a page is open', () => {
+  it('stays on the page and says why the other one doesn’t open', async () => {
+    vi.spyOn(console, 'warn').mockImplementation(() => {})
+    serverKnows('admin')
+    await router.push('/people')
+    stubApi({ 'GET /firm': new TypeError('Failed to fetch') })
+    router.addRoute({ path: '/far', component: () => Promise.reject(new TypeError('Failed to fetch dynamically imported module')) })
+    await router.push('/far').catch(() => {})
+    await flushPromises()
+    expect(router.currentRoute.value.path).toBe('/people')
+    expect(navigationProblem.value).toBeNull()
+    expect(useUndoToast().toasts.value.at(-1)).toMatchObject({ isProblem: true, text: expect.stringContaining('can’t be reached') })
   })
 })
