@@ -1,7 +1,7 @@
 import { defineStore } from 'pinia'
 import { useSessionStore } from './session.ts'
 
-/** What was typed into a room and isn't saved: the form as it stood, and the room that it was made from. */
+/** What was typed into a room, or into the details of a house, and isn't saved: the form as it stood, and the record that it was made from. */
 export interface LaidByDraft {
   draft: unknown
   saved: unknown
@@ -18,7 +18,8 @@ export const useRoomDraftsStore = defineStore('room-drafts', () => {
   }
 
   function layBy(roomId: string, laidBy: LaidByDraft): void {
-    write(keyOf(roomId), laidBy)
+    // Once the session has ended nothing more is anybody's; what was typed before is kept already.
+    if (session.user) write(keyOf(roomId), laidBy)
   }
 
   function takeUp(roomId: string): LaidByDraft | null {
@@ -27,7 +28,7 @@ export const useRoomDraftsStore = defineStore('room-drafts', () => {
   }
 
   function drop(roomId: string): void {
-    write(keyOf(roomId), null)
+    if (session.user) write(keyOf(roomId), null)
   }
 
   return { layBy, takeUp, drop }

@@ -34,7 +34,10 @@ const BASICS = {
   'GET /houses': [],
 }
 
-beforeEach(() => vi.useFakeTimers({ toFake: ['setTimeout', 'clearTimeout'] }))
+beforeEach(() => {
+  localStorage.clear()
+  vi.useFakeTimers({ toFake: ['setTimeout', 'clearTimeout'] })
+})
 afterEach(() => {
   vi.useRealTimers()
   vi.unstubAllGlobals()
@@ -180,5 +183,20 @@ describe('HouseDetailsForm', () => {
     const { wrapper, field } = await openDetails()
     await wrapper.setProps({ house: buildHouse({ name: 'Lantern House', version: 4 }) })
     expect((field('Name').element as HTMLInputElement).value).toBe('Lantern House')
+  })
+
+  it('takes up again what the end of the session left unsaved', async () => {
+    const refusal = problemAnswer(401, 'signed-out', 'Sign in first.')
+    const first = await openDetails(buildHouse(), { 'PATCH /houses/h1': refusal })
+    await first.field('Note').setValue('Soft floor by the tub')
+    await first.rest()
+    first.wrapper.unmount()
+    await flushPromises()
+
+    const second = await openDetails(buildHouse({ version: 4, yearBuilt: 1925 }))
+    await second.rest()
+    expect((second.field('Note').element as HTMLTextAreaElement).value).toBe('Soft floor by the tub')
+    expect(second.api.callsTo('PATCH /houses/h1').at(-1)?.body).toEqual({ note: 'Soft floor by the tub' })
+    expect(localStorage).toHaveLength(0)
   })
 })

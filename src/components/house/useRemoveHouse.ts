@@ -3,8 +3,8 @@ import { ref } from 'vue'
 import { housesQuery, removeHouse, restoreHouse } from '../../api/houses.ts'
 import { useUndoToast } from '../../composables/useUndoToast.ts'
 
-/** Removes a house and offers to bring it back. */
-export function useRemoveHouse() {
+/** Removes a house and offers to bring it back. `onRemoved` is called while the house still stands in the list on the screen. */
+export function useRemoveHouse(onRemoved: () => void) {
   const queries = useQueryClient()
   const { offerUndo, sayProblem } = useUndoToast()
   const isBusy = ref(false)
@@ -18,6 +18,7 @@ export function useRemoveHouse() {
     isBusy.value = true
     try {
       await removeHouse(id)
+      onRemoved()
       queries.setQueryData(housesQuery.queryKey, (houses) => houses?.filter((house) => house.id !== id))
       offerUndo(`${name} removed`, () => restore(id))
     } catch (error) {

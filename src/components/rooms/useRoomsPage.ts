@@ -93,7 +93,8 @@ export function useRoomsPage(houseId: string, rooms: Readonly<Ref<Room[] | undef
     await editors.get(id)?.save.flush()
     const room = roomOf(id)
     if (!room) return
-    const { use, shape, ceiling, openings, deductions, note } = room
+    // What is keyed, though it may be waiting for the connection.
+    const { use, shape, ceiling, openings, deductions, note } = editors.get(id)?.save.mine.value ?? room
     const name = copyName(
       room.name,
       entries.value.map((entry) => entry.name),
