@@ -91,7 +91,10 @@ export function useGridClipboard(desk: EstimateDesk, clear: (rows: readonly Line
       { kind: 'mark', marks },
     ]
     edits.run({ words: words(plan), changes: changes.filter(isSomething) })
-    const wrongWords = plan.wrong.length === 0 ? '' : `; ${plan.wrong.length} cells couldn’t be taken and are marked`
+    const wrongWords =
+      plan.wrong.length === 0
+        ? ''
+        : `; ${plan.wrong.length === 1 ? 'one cell couldn’t be taken and is' : `${plan.wrong.length} cells couldn’t be taken and are`} marked`
     if (plan.rowCount > 1 || plan.wrong.length > 0) say(`${counted(plan.rowCount)} pasted${wrongWords}.`)
   }
 

@@ -1,11 +1,12 @@
 import type { GridApi, IRowNode } from 'ag-grid-community'
-import { onScopeDispose } from 'vue'
+import { nextTick, onScopeDispose } from 'vue'
 import type { GridRow } from './estimateRows.ts'
 import { rowsDiff } from './rowsDiff.ts'
 import type { EstimateRows, RowsNews } from './useEstimateRows.ts'
 
 /** Keeps the grid's rows like the estimate's: a changed line is drawn anew alone, and after a move the focus stays with its line. */
 export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | null) {
+  let isStaying = false
   /** The rows that the grid has. */
   let shown = rows.rows.value
   const stop = rows.onNews((news) => {
@@ -24,7 +25,7 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
     const focused = grid.getFocusedCell() ?? null
     const key = focused === null ? undefined : grid.getDisplayedRowAtIndex(focused.rowIndex)?.data?.key
     takeRows(grid)
-    if (focused === null || key === undefined) return
+    if (focused === null || key === undefined || isStaying) return
     const now = grid.getRowNode(key)?.rowIndex ?? null
     // Where the focused line is gone, the focus stays where it was, on the line that moved up.
     const goal = now ?? Math.min(focused.rowIndex, grid.getDisplayedRowCount() - 1)
@@ -48,6 +49,16 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
     if (rowNodes.length > 0) grid.refreshCells({ rowNodes, force: true, suppressFlash: true, ...(columns ? { columns } : {}) })
   }
 
+  /** Does something to the focused line that may take it elsewhere, and leaves the focus where it is, on the line that comes into its place. */
+  function stay(grid: GridApi<GridRow>, act: () => void): void {
+    const focused = grid.getFocusedCell()
+    isStaying = true
+    act()
+    isStaying = false
+    // The grid itself moves on after an entry, but from where its line went to.
+    void nextTick(() => focused && grid.setFocusedCell(Math.min(focused.rowIndex, grid.getDisplayedRowCount() - 1), focused.column))
+  }
+
   function redraw(grid: GridApi<GridRow>, changed: readonly GridRow[]): void {
     const isMany = changed.length > 100
     const rowNodes = isMany ? grid.getRenderedNodes() : changed.flatMap(({ key }) => grid.getRowNode(key) ?? [])
@@ -61,4 +72,6 @@ export function useGridSync(rows: EstimateRows, api: () => GridApi<GridRow> | nu
     if (edited) refresh(grid, lineNodes.filter(isEdited), otherColumns(grid, edited.colId))
     for (const node of rowNodes) if (node.data && node.data.kind !== 'line') node.setData(node.data)
   }
+
+  return { stay }
 }
