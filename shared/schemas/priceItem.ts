@@ -80,7 +80,7 @@ export const regionSchema = z.strictObject({
 /** A region as one version of the book has it, with the row's version for If-Match. */
 export const priceRegionSchema = regionSchema.extend({ rowVersion: versionSchema })
 export const regionPatchSchema = regionSchema.omit({ key: true }).partial()
-export const publishSchema = z.strictObject({ note: noteSchema.trim().min(1, 'say what changed'), effectiveDate: isoDateSchema })
+export const publishSchema = z.strictObject({ note: noteSchema.trim().min(1, 'Say what changed.'), effectiveDate: isoDateSchema })
 
 export const priceBookVersionSchema = z.object({
   version: versionSchema,

@@ -232,7 +232,7 @@ describe('the price book', () => {
       })
       await press(wrapper, 'Publish version 2')
       await press(wrapper, 'Publish version 2')
-      expect(document.body.textContent).toContain('say what changed')
+      expect(document.body.textContent).toContain('Say what changed.')
       const note = document.querySelector('textarea')
       if (!note) throw new Error('There is no field for a note')
       note.value = 'Dearer planks'
