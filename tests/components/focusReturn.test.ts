@@ -1,5 +1,5 @@
 import { flushPromises, mount } from '@vue/test-utils'
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import { defineComponent, nextTick, ref } from 'vue'
 import BaseDialog from '../../src/components/base/BaseDialog.vue'
 
@@ -24,6 +24,7 @@ async function openFromButton(): Promise<void> {
   opener.focus()
   opener.click()
   await settle()
+  await vi.waitFor(() => expect(document.getElementById('inside')).not.toBeNull())
   document.getElementById('inside')!.focus()
 }
 
@@ -42,8 +43,7 @@ describe('A dialog that closes', () => {
     await openFromButton()
     expect(document.activeElement?.id).toBe('inside')
     isOpen.value = false
-    await settle()
-    expect(document.activeElement?.id).toBe('opener')
+    await vi.waitFor(() => expect(document.activeElement?.id).toBe('opener'))
   })
 
   it('gives it to the page when what opened it has gone with what was done', async () => {
@@ -51,7 +51,6 @@ describe('A dialog that closes', () => {
     await openFromButton()
     hasButton.value = false
     isOpen.value = false
-    await settle()
-    expect(document.activeElement?.id).toBe('main')
+    await vi.waitFor(() => expect(document.activeElement?.id).toBe('main'))
   })
 })
