@@ -128,7 +128,7 @@ describe('the price book', () => {
 
     it('shows what a region pays', async () => {
       const { api, wrapper } = await open('estimator', [published])
-      const region = field('Prices of')
+      const region = field('Region')
       region.value = 'merrow-harbor'
       region.dispatchEvent(new Event('change', { bubbles: true }))
       await flushPromises()

@@ -32,7 +32,7 @@ const AFTER_PRICES: readonly FieldColumn[] = [
   { field: 'laborSharePercent', title: 'Labor, %', spokenTitle: 'Labor share', width: 80, isFigure: true },
   { field: 'wastePercent', title: 'Waste, %', spokenTitle: 'Waste', width: 82, isFigure: true },
   { field: 'packageSize', title: 'Package', spokenTitle: 'Package size', width: 84, isFigure: true },
-  { field: 'packageName', title: 'in a', spokenTitle: 'Package name', width: 90, isFigure: false },
+  { field: 'packageName', title: 'Packed in', spokenTitle: 'Package name', width: 90, isFigure: false },
   { field: 'hoursPerUnit', title: 'Hours a unit', spokenTitle: 'Hours a unit', width: 100, isFigure: true },
 ]
 const LAST: readonly FieldColumn[] = [
