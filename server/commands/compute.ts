@@ -1,10 +1,6 @@
 import { readFile } from 'node:fs/promises'
 import { buffer } from 'node:stream/consumers'
-import { readEstimateDocument } from '../../shared/engine/document/readEstimateDocument.ts'
-import { LiveEstimate } from '../../shared/engine/estimate/liveEstimate.ts'
-import type { EstimateInput } from '../../shared/engine/estimateInput.ts'
-import { needsNoParser } from '../../shared/engine/formula/parseFormula.ts'
-import type { FormulaParser } from '../../shared/engine/formula/parsedNode.ts'
+import { computeEstimate, readEstimateDocument } from '../../shared/engine/index.ts'
 import type { FieldProblem, Problem } from '../../shared/schemas/problem.ts'
 
 /** What a shell sees when the document can't be computed. */
@@ -22,7 +18,7 @@ async function compute(path: string | undefined): Promise<void> {
   if ('message' in json) return refuse('not-json', `The document is not JSON: ${json.message}`)
   const read = readEstimateDocument(json.value)
   if (!read.ok) return refuse('invalid', detailOf(read.errors), read.errors)
-  print(new LiveEstimate(read.input, await parserFor(read.input)).results())
+  print(computeEstimate(read.input))
 }
 
 async function readText(path: string): Promise<string | null> {
@@ -40,14 +36,6 @@ function parseJson(text: string): { value: unknown } | { message: string } {
   } catch (error) {
     return { message: error instanceof Error ? error.message : String(error) }
   }
-}
-
-/** The parser takes most of a second to load, so it is left out where every quantity is a number or a measure. */
-async function parserFor({ lines }: EstimateInput): Promise<FormulaParser> {
-  const isPlain = lines.every(({ quantity }) => needsNoParser(String(quantity)))
-  if (isPlain) return () => ({ type: 'none' })
-  const { mathjsParse } = await import('../../shared/engine/formula/mathjsParse.ts')
-  return mathjsParse
 }
 
 function refuse(code: string, detail: string, errors?: FieldProblem[]): void {

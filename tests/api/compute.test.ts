@@ -97,7 +97,7 @@ describe('POST /api/compute', () => {
     expect(answer.body.errors[0].path.startsWith(path)).toBe(true)
   })
 
-  it('refuses a field named __proto__ by its name, as any other that it does not know', async () => {
+  it('refuses a field named __proto__ by its name, like every other that it does not know', async () => {
     const text = JSON.stringify(DOCUMENT).replace('{', '{"__proto__":{"isAdmin":true},')
     const answer = await estimator.agent.post('/api/compute').set('Content-Type', 'application/json').send(text)
     expect(answer.status).toBe(422)
